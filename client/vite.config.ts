@@ -1,0 +1,16 @@
+import react from '@vitejs/plugin-react'
+import { defaultClientConditions } from 'vite'
+import { defineConfig } from 'vitest/config'
+
+export default defineConfig({
+  plugins: [react()],
+  resolve: { conditions: ['@wadestone/source', ...defaultClientConditions] },
+  server: { host: '127.0.0.1', port: 5173, strictPort: true, proxy: { '/api': 'http://127.0.0.1:3000' } },
+  build: { target: 'es2022' },
+  test: {
+    environment: 'jsdom',
+    include: ['src/**/*.test.{ts,tsx}'],
+    setupFiles: ['src/test-setup.ts'],
+    passWithNoTests: false,
+  },
+})
