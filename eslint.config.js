@@ -8,7 +8,8 @@ const forbid = (groups, message) => ({
   'no-restricted-imports': ['error', { patterns: [{ regex: groups, message }] }],
 })
 
-const serverDomains = 'accounts|districts|producers|jobs|surveys|designs|schedules|packets|signatures|reviews|uploads|mail|checkouts|inspections|reports'
+const serverDomains =
+  'accounts|districts|producers|jobs|surveys|designs|schedules|packets|signatures|reviews|uploads|mail|checkouts|inspections|reports'
 
 export default tseslint.config(
   {

@@ -1,0 +1,30 @@
+/** Every problem the server can answer with: slug, title and status (RFC 9457). No status is given at a throw site. */
+export const problemCatalogue = {
+  'malformed-request': { status: 400, title: 'The request could not be read' },
+  'not-signed-in': { status: 401, title: 'Sign in to go on' },
+  'wrong-sign-in': { status: 401, title: 'E-mail or password is not right' },
+  'wrong-code': { status: 401, title: 'The code is not right or no longer good' },
+  forbidden: { status: 403, title: 'You may not do this' },
+  'foreign-origin': { status: 403, title: 'The request came from another site' },
+  'not-found': { status: 404, title: 'There is nothing here for you' },
+  'transition-not-allowed': { status: 409, title: 'The job cannot do this now' },
+  'already-in-use': { status: 409, title: 'This is in use and can no longer be changed' },
+  'already-exists': { status: 409, title: 'This exists already' },
+  'idempotency-key-reused': { status: 409, title: 'This key was used for another request' },
+  'still-running': { status: 409, title: 'The same request is still running' },
+  'link-spent': { status: 410, title: 'This link is no longer good' },
+  'stale-version': { status: 412, title: 'Someone saved a newer version' },
+  'body-too-large': { status: 413, title: 'This is too large' },
+  'wrong-media-type': { status: 415, title: 'This kind of content is not taken here' },
+  'invalid-fields': { status: 422, title: 'Some fields need another look' },
+  'unreadable-file': { status: 422, title: 'The file could not be read' },
+  'setting-missing': { status: 422, title: 'A district setting is still empty' },
+  'design-incomplete': { status: 422, title: 'The design is not complete' },
+  'schedule-not-mapped': { status: 422, title: 'A schedule line is not mapped' },
+  'version-required': { status: 428, title: 'Say which version you saw' },
+  'too-many-tries': { status: 429, title: 'Too many tries' },
+  unexpected: { status: 500, title: 'Something went wrong here' },
+  'not-ready': { status: 503, title: 'Wadestone is busy or starting' },
+} as const
+
+export type ProblemSlug = keyof typeof problemCatalogue

@@ -1,0 +1,60 @@
+import { z } from 'zod'
+
+/** A whole number of cents as a decimal string of two places, such as "72.59". Never a float. */
+export type Money = string & { readonly __money: unique symbol }
+
+export const moneySchema = z
+  .string()
+  .regex(/^\d{1,12}\.\d{2}$/, 'Give dollars and cents, such as 72.59')
+  .transform((text) => text as Money)
+
+/** A rate in dollars per unit, up to four places, such as "1.8500". */
+export const rateSchema = z
+  .string()
+  .regex(/^\d{1,10}(\.\d{1,4})?$/, 'Give a rate in dollars, up to four places, such as 1.85')
+
+/** A civil date. It never passes through a Date object, so that no zone can move it. */
+export const civilDateSchema = z.iso.date('Give a date as YYYY-MM-DD, such as 2026-05-14')
+
+export const instantSchema = z.iso.datetime({ offset: true })
+
+export const idSchema = z.uuid('This is not an id of Wadestone')
+
+export const sha256Schema = z.string().regex(/^[0-9a-f]{64}$/, 'A SHA-256 has 64 hexadecimal digits')
+
+/** One line of text a person types: trimmed, no control characters, so that it prints and mails safely. */
+export const lineOfText = (max: number) =>
+  z
+    .string()
+    .trim()
+    .min(1, 'This must not be empty')
+    .max(max, `Use at most ${max} characters`)
+    .refine(
+      (text) => !/\p{Cc}|[\u202A-\u202E\u2066-\u2069]/u.test(text),
+      'Control characters are not allowed',
+    )
+
+/** Several lines of text a person types. */
+export const paragraph = (max: number) =>
+  z
+    .string()
+    .trim()
+    .min(1, 'This must not be empty')
+    .max(max, `Use at most ${max} characters`)
+    .refine(
+      (text) => !/[\u0000-\u0008\u000B-\u001F\u007F\u202A-\u202E\u2066-\u2069]/.test(text),
+      'Control characters are not allowed',
+    )
+
+export const emailSchema = z
+  .email('Give one e-mail address, such as name@example.org')
+  .max(254, 'An e-mail address has at most 254 characters')
+  .refine((text) => !/[\p{Cc},;<>"]/u.test(text), 'Give one plain e-mail address')
+  .transform((text) => text.toLowerCase())
+
+/** A finite number within limits; the message names the range so that the form can show it. */
+export const numberBetween = (minimum: number, maximum: number, unit: string) =>
+  z
+    .number(`Give a number from ${minimum} to ${maximum} ${unit}`.trim())
+    .min(minimum, `Must be at least ${minimum} ${unit}`.trim())
+    .max(maximum, `Must be at most ${maximum} ${unit}`.trim())

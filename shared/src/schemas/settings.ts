@@ -1,0 +1,30 @@
+import { z } from 'zod'
+import { civilDateSchema, lineOfText } from './primitives.js'
+
+/** One engineering setting of a district. An empty value means: not entered yet. */
+export const settingValueSchema = z.strictObject({
+  key: z.string().min(1).max(60),
+  value: z.number().nullable(),
+  source: lineOfText(200),
+  sourceDate: civilDateSchema,
+})
+
+export const settingsInputSchema = z.strictObject({
+  settings: z.array(settingValueSchema).min(1).max(100),
+})
+
+export type SettingValue = z.infer<typeof settingValueSchema>
+
+export interface SettingView extends SettingValue {
+  label: string
+  unit: string
+  minimum: number
+  maximum: number
+  isNeeded: boolean
+  hint: string
+}
+
+export interface SettingsView {
+  version: number
+  settings: SettingView[]
+}
