@@ -5,7 +5,12 @@ import { defineConfig } from 'vitest/config'
 export default defineConfig({
   plugins: [react()],
   resolve: { conditions: ['@wadestone/source', ...defaultClientConditions] },
-  server: { host: '127.0.0.1', port: 5173, strictPort: true, proxy: { '/api': 'http://127.0.0.1:3000' } },
+  server: {
+    host: '127.0.0.1',
+    port: 5173,
+    strictPort: true,
+    proxy: { '/api': process.env.API_ADDRESS ?? 'http://127.0.0.1:3000' },
+  },
   build: { target: 'es2022' },
   test: {
     environment: 'jsdom',
