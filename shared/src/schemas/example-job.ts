@@ -8,6 +8,21 @@ import { paragraph } from './primitives.js'
 import { scheduleInputSchema } from './schedule.js'
 import { settingValueSchema } from './settings.js'
 
+/** What a reader asks for, and what the planner then changes in the plan. */
+const askedChangeSchema = z.strictObject({
+  note: paragraph(2000),
+  page: z.number().int().min(1).max(200).optional(),
+  change: z
+    .array(
+      z.strictObject({
+        path: z.string().regex(/^(\/[\w-]+)+$/, 'Name the value by its path, such as /ramp/widthFt'),
+        value: z.union([z.number(), z.string(), z.boolean()]),
+      }),
+    )
+    .min(1)
+    .max(20),
+})
+
 /** A whole job as a file: what the tour takes. The level notes stand beside it as CSV. */
 export const exampleJobSchema = z.strictObject({
   inputVersion: z.literal(1),
@@ -24,9 +39,10 @@ export const exampleJobSchema = z.strictObject({
     closing: levelClosingSchema.optional(),
   }),
   plan: designPlanSchema,
-  landownerAsks: paragraph(2000),
-  plannerAnswers: paragraph(2000),
-  supervisorAsks: paragraph(2000),
+  landownerAsks: askedChangeSchema,
+  plannerAnswersLandowner: paragraph(2000),
+  supervisorAsks: askedChangeSchema,
+  plannerAnswersSupervisor: paragraph(2000),
 })
 
 export type ExampleJob = z.infer<typeof exampleJobSchema>
