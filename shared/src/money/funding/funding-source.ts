@@ -1,4 +1,4 @@
-import type { Money } from '../schemas/primitives.js'
+import type { Money } from '../../schemas/primitives.js'
 
 export interface FundingSourceLine {
   /** Key of the line of quantities that this rate pays. */

@@ -1,0 +1,87 @@
+import Papa from 'papaparse'
+import { parseStation } from '../../format/parse-station.js'
+import { EngineeringInputError } from '../engineering-input-error.js'
+import { type LevelNotesColumn, levelNotesColumns } from './level-notes-columns.js'
+import type { LevelRow } from './reduce-level-notes.js'
+
+const NUMBER = /^[+-]?(\d+\.?\d*|\.\d+)$/
+const MOST_SENTENCES = 10
+
+interface Figure {
+  column: LevelNotesColumn
+  key: 'stationFt' | 'backsightFt' | 'intermediateFt' | 'foresightFt' | 'waterDepthFt'
+  read: (text: string) => number | undefined
+  example: string
+}
+
+const readNumber = (text: string): number | undefined => (NUMBER.test(text) ? Number(text) : undefined)
+
+const FIGURES: readonly Figure[] = [
+  { column: 'station', key: 'stationFt', read: parseStation, example: '0+42 or 42' },
+  { column: 'bs', key: 'backsightFt', read: readNumber, example: '4.86' },
+  { column: 'is', key: 'intermediateFt', read: readNumber, example: '5.86' },
+  { column: 'fs', key: 'foresightFt', read: readNumber, example: '9.46' },
+  { column: 'water_depth', key: 'waterDepthFt', read: readNumber, example: '3.5' },
+]
+
+/**
+ * Rows of a field book from a CSV file (comma, semicolon or tab). First row: label, station, bs, is, fs, water_depth
+ * in any order and in their usual spellings; stations as 0+42 or 42. Empty lines are passed over.
+ *
+ * @param input.text content of the file; readings in ft with a decimal point.
+ * @returns rows for reduceLevelNotes, which checks the sights themselves.
+ * @throws EngineeringInputError naming `text`, with one sentence for each bad figure (file row and column).
+ * @see common practice, no source.
+ * @example parseLevelNotesCsv({ text: 'label,station,bs,is,fs\nBM,,4.86,,\n0+20,0+20,,6.46,' })
+ */
+export function parseLevelNotesCsv({ text }: { text: string }): LevelRow[] {
+  const [header, ...lines] = cells(text)
+  if (header === undefined) return refuse(['The file is empty.'])
+  const columns = levelNotesColumns(header.values)
+  if (lines.length === 0) return refuse(['The file has column names but no rows under them.'])
+  const problems: string[] = []
+  const rows = lines.map(({ values, fileRow }): LevelRow => {
+    const at = (column: LevelNotesColumn): string => values[columns.get(column) ?? -1]?.trim() ?? ''
+    const row: LevelRow = { label: at('label') || at('station') || `row ${fileRow}` }
+    for (const { column, key, read, example } of FIGURES) {
+      const written = at(column)
+      if (written === '') continue
+      const figure = read(written)
+      if (figure === undefined) {
+        problems.push(`Row ${fileRow}, column ${column}: "${written}" is not a number such as ${example}.`)
+      } else row[key] = figure
+    }
+    return row
+  })
+  return problems.length > 0 ? refuse(problems) : rows
+}
+
+interface Line {
+  values: string[]
+  fileRow: number
+}
+
+function cells(text: string): Line[] {
+  if (typeof text !== 'string' || text.includes('\0')) {
+    return refuse(['This is not a text file. Save the level notes as CSV and choose that file.'])
+  }
+  const { data, errors } = Papa.parse<string[]>(text.replace(/^\uFEFF/, ''), { delimiter: delimiterOf(text) })
+  const quoting = errors.find(({ type }) => type === 'Quotes')
+  if (quoting) return refuse([`Row ${(quoting.row ?? 0) + 1} has a quotation mark that is not closed.`])
+  return data
+    .map((values, index) => ({ values, fileRow: index + 1 }))
+    .filter(({ values }) => values.some((value) => value.trim() !== ''))
+}
+
+/** The header decides; guessing over the whole file is led astray by commas in remarks. */
+function delimiterOf(text: string): string {
+  const header = text.trimStart().split(/\r\n|\r|\n/, 1)[0] ?? ''
+  return [';', '\t'].find((mark) => header.includes(mark)) ?? ','
+}
+
+function refuse(sentences: string[]): never {
+  const shown = sentences.slice(0, MOST_SENTENCES)
+  const left = sentences.length - shown.length
+  const more = left > 0 ? [`And ${left} more.`] : []
+  throw new EngineeringInputError({ field: 'text', message: [...shown, ...more].join(' ') })
+}

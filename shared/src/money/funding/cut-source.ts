@@ -1,0 +1,117 @@
+import type { Money } from '../../schemas/primitives.js'
+import { allocateMoney } from '../allocate-money.js'
+import { Exact, exactSum, type ExactNumber } from '../exact.js'
+import { halfUpToCents } from '../half-up-to-cents.js'
+import { requireDecimal } from '../require-decimal.js'
+import { subtractMoney } from '../money-arithmetic.js'
+import type { FundingCut, FundingSource } from './funding-source.js'
+import type { PaidSoFar, Share, StackRule } from './stack-state.js'
+import type { SourceOffer } from './source-offer.js'
+
+export interface CutOffer {
+  paid: Money
+  shares: Share[]
+  cuts: FundingCut[]
+}
+
+interface Step {
+  shares: Share[]
+  /** What the cut is split between, by weight. */
+  reasons: { reason: string; weight: ExactNumber }[]
+}
+
+const practicesOf = (shares: readonly Share[]): string[] => [...new Set(shares.map(({ practice }) => practice))]
+
+const sumOf = (shares: readonly Share[]): ExactNumber => exactSum(shares.map(({ amount }) => amount))
+
+/**
+ * Cuts a source, in this order: no eligible line, its cap, the person's limit, its exclusive group, the stack limit.
+ */
+export function cutSource(
+  source: FundingSource,
+  { offered, shares }: SourceOffer,
+  paid: PaidSoFar,
+  rule: StackRule,
+): CutOffer {
+  const { key, cap, personLimitRemaining, exclusiveGroup } = source
+  const steps: ((open: Share[]) => Step)[] = [
+    (open) => ({ shares: open, reasons: [whole('no line of this job is eligible')] }),
+    (open) => downTo(open, cap, `${key}.cap`, 'source cap'),
+    (open) => downTo(open, personLimitRemaining, `${key}.personLimitRemaining`, 'person limit'),
+    (open) => outsideTheGroup(open, exclusiveGroup, paid),
+    (open) => (rule.scope === 'practice' ? insideEachPractice(open, paid, rule) : unchanged(open)),
+    (open) => insideTheJob(open, paid, rule),
+  ]
+  let left: CutOffer = { paid: offered, shares, cuts: [] }
+  for (const step of steps) left = applied(left, step(left.shares))
+  return left
+}
+
+const whole = (reason: string) => ({ reason, weight: new Exact(1) })
+const unchanged = (shares: Share[]): Step => ({ shares, reasons: [] })
+
+function applied(before: CutOffer, { shares, reasons }: Step): CutOffer {
+  const paid = halfUpToCents(sumOf(shares))
+  const cut = subtractMoney(before.paid, paid)
+  const amounts = allocateMoney(
+    cut,
+    reasons.map(({ weight }) => weight),
+  )
+  const cuts = reasons.flatMap(({ reason }, index) => {
+    const amount = amounts[index]
+    return amount === undefined || amount === '0.00' ? [] : [{ reason, amount }]
+  })
+  return { paid, shares, cuts: [...before.cuts, ...cuts] }
+}
+
+function downTo(shares: Share[], limit: string | undefined, field: string, name: string): Step {
+  if (limit === undefined) return unchanged(shares)
+  const most = halfUpToCents(requireDecimal({ field, value: limit }))
+  return { shares: scaledTo(shares, new Exact(most)), reasons: [whole(`${name} ${most}`)] }
+}
+
+function outsideTheGroup(shares: Share[], group: string | undefined, { byGroup }: PaidSoFar): Step {
+  const payerOf = (practice: string) => byGroup.get(`${group}/${practice}`)
+  const taken = practicesOf(shares).filter((practice) => payerOf(practice) !== undefined)
+  return {
+    shares: shares.filter(({ practice }) => !taken.includes(practice)),
+    reasons: taken.map((practice) => ({
+      reason: `practice ${practice} is already paid by ${payerOf(practice)} of the same group`,
+      weight: sumOf(shares.filter((share) => share.practice === practice)),
+    })),
+  }
+}
+
+/** Whole cents, rounded down, so that no rounding can lift the whole above its limit. */
+const limitOf = (cost: ExactNumber, percent: number): ExactNumber =>
+  cost.times(percent).dividedBy(100).toDecimalPlaces(2, Exact.ROUND_DOWN)
+
+function insideTheJob(shares: Share[], paid: PaidSoFar, rule: StackRule): Step {
+  const room = limitOf(rule.estimatedCost, rule.limitPercent).minus(paid.total)
+  return {
+    shares: scaledTo(shares, Exact.max(room, 0)),
+    reasons: [whole(`stack limit ${rule.limitPercent} % of estimated cost`)],
+  }
+}
+
+function insideEachPractice(shares: Share[], paid: PaidSoFar, rule: StackRule): Step {
+  const parts = practicesOf(shares).map((practice) => {
+    const mine = shares.filter((share) => share.practice === practice)
+    const cost = exactSum(rule.lines.filter((line) => line.practice === practice).map((line) => line.cost))
+    const room = limitOf(cost, rule.limitPercent).minus(paid.byPractice.get(practice) ?? 0)
+    const held = scaledTo(mine, Exact.max(room, 0))
+    const reason = `stack limit ${rule.limitPercent} % of estimated cost, practice ${practice}`
+    return { held, reason, weight: sumOf(mine).minus(sumOf(held)) }
+  })
+  const byKey = new Map(parts.flatMap(({ held }) => held).map((share) => [share.key, share]))
+  return {
+    shares: shares.map((share) => byKey.get(share.key) ?? share),
+    reasons: parts.map(({ reason, weight }) => ({ reason, weight })),
+  }
+}
+
+function scaledTo(shares: Share[], most: ExactNumber): Share[] {
+  const sum = sumOf(shares)
+  if (sum.lessThanOrEqualTo(most)) return shares
+  return shares.map((share) => ({ ...share, amount: share.amount.times(most).dividedBy(sum) }))
+}
