@@ -29,9 +29,7 @@ export function payable(input: PayableInput): PayableResult {
   const holdBack = input.final ? noMoney : percentOfMoney(limited, percent)
   const lessAdvances = addMoney(...input.advances.map((value) => amountOf('advances', value)))
   const lessPartials = addMoney(...input.partials.map((value) => amountOf('partials', value)))
-  const left = new Exact(limited).minus(holdBack)
-    .minus(lessAdvances)
-    .minus(lessPartials)
+  const left = new Exact(limited).minus(holdBack).minus(lessAdvances).minus(lessPartials)
   return {
     lines,
     earned,

@@ -1,4 +1,4 @@
-import type { FundingSource } from '../../money/funding-source.js'
+import type { FundingSource } from '../../money/funding/funding-source.js'
 import type { CostLine } from '../../schemas/cost-list.js'
 import type { Criterion } from '../../schemas/criteria.js'
 import type { DesignPlan } from '../../schemas/design-plan.js'

@@ -1,5 +1,5 @@
 import type { CostEstimate } from '../../money/cost-estimate-result.js'
-import type { FundingResult } from '../../money/funding-source.js'
+import type { FundingResult } from '../../money/funding/funding-source.js'
 import type { CheckResult } from '../checks/check-result.js'
 import type { PartResult } from './part-result.js'
 import type {

@@ -20,7 +20,9 @@ interface Step {
   reasons: { reason: string; weight: ExactNumber }[]
 }
 
-const practicesOf = (shares: readonly Share[]): string[] => [...new Set(shares.map(({ practice }) => practice))]
+const practicesOf = (shares: readonly Share[]): string[] => [
+  ...new Set(shares.map(({ practice }) => practice)),
+]
 
 const sumOf = (shares: readonly Share[]): ExactNumber => exactSum(shares.map(({ amount }) => amount))
 
