@@ -1,0 +1,2 @@
+/** Keeps a number and its unit on one line. */
+export const noBreakSpace = '\u00a0'
