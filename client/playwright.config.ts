@@ -1,0 +1,36 @@
+import { readFileSync } from 'node:fs'
+import { join } from 'node:path'
+import { defineConfig } from '@playwright/test'
+
+const runFolder = process.env.RUN_FOLDER ?? join(import.meta.dirname, '..', '.run')
+
+/** The running Wadestone: given by `npm test`, else the one that `npm start` runs here. */
+const address = process.env.WADESTONE_ADDRESS ?? readFileSync(join(runFolder, 'address'), 'utf8')
+
+export default defineConfig({
+  testDir: 'e2e',
+  outputDir: join(runFolder, 'browser-tests'),
+  workers: 1,
+  retries: 0,
+  forbidOnly: true,
+  timeout: 120_000,
+  expect: { timeout: 15_000 },
+  use: {
+    baseURL: address,
+    viewport: { width: 1440, height: 900 },
+    screenshot: 'only-on-failure',
+    launchOptions: {
+      executablePath: '/usr/bin/chromium',
+      // Nothing but the product's own requests leaves the browser.
+      args: [
+        '--no-sandbox',
+        '--disable-gpu',
+        '--disable-quic',
+        '--no-first-run',
+        '--disable-background-networking',
+        '--disable-component-update',
+        '--disable-sync',
+      ],
+    },
+  },
+})
