@@ -1,5 +1,5 @@
 import { describe, expect, it } from 'vitest'
-import { parseLevelNotesCsv } from './parse-level-notes-csv.js'
+import { parseLevelNotesCsv, readLevelNotesCsv } from './parse-level-notes-csv.js'
 
 const refusal = (text: string): string => {
   try {
@@ -76,5 +76,24 @@ describe('parseLevelNotesCsv', () => {
     ['label,bs\n"A,1\nB,2', 'quotation mark that is not closed'],
   ])('refuses the file %j and says why', (written, sentence) => {
     expect(refusal(written)).toContain(sentence)
+  })
+})
+
+describe('a field book read for a form', () => {
+  it('keeps every row and names each bad figure by its file row and column', () => {
+    const text = 'label,station,bs,is,fs\nBM,,4.86,,\n0+00,0+00,,x,\n\n0+20,0+20,,6.46,'
+    const { rows, errors } = readLevelNotesCsv({ text })
+    expect(rows).toEqual([
+      { label: 'BM', backsightFt: 4.86 },
+      { label: '0+00', stationFt: 0 },
+      { label: '0+20', stationFt: 20, intermediateFt: 6.46 },
+    ])
+    expect(errors).toEqual([
+      { row: 3, column: 'is', message: 'Row 3, column is: "x" is not a number such as 5.86.' },
+    ])
+  })
+
+  it('refuses a file that is no table of level notes as a whole', () => {
+    expect(() => readLevelNotesCsv({ text: '%PDF-1.7\n1 0 obj' })).toThrow(/column/i)
   })
 })

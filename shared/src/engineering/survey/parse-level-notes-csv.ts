@@ -35,11 +35,32 @@ const FIGURES: readonly Figure[] = [
  * @example parseLevelNotesCsv({ text: 'label,station,bs,is,fs\nBM,,4.86,,\n0+20,0+20,,6.46,' })
  */
 export function parseLevelNotesCsv({ text }: { text: string }): LevelRow[] {
+  const { rows, errors } = readLevelNotesCsv({ text })
+  return errors.length > 0 ? refuse(errors.map(({ message }) => message)) : rows
+}
+
+export interface LevelNotesCsvError {
+  /** As the file counts, the column names being row 1. */
+  row: number
+  column: LevelNotesColumn
+  message: string
+}
+
+export interface LevelNotesCsv {
+  rows: LevelRow[]
+  errors: LevelNotesCsvError[]
+}
+
+/**
+ * The same for a form that shows each bad figure beside its row: a figure that is no number is left out of its row and
+ * named in `errors`. Throws only when the file as a whole is no table of level notes.
+ */
+export function readLevelNotesCsv({ text }: { text: string }): LevelNotesCsv {
   const [header, ...lines] = cells(text)
   if (header === undefined) return refuse(['The file is empty.'])
   const columns = levelNotesColumns(header.values)
   if (lines.length === 0) return refuse(['The file has column names but no rows under them.'])
-  const problems: string[] = []
+  const errors: LevelNotesCsvError[] = []
   const rows = lines.map(({ values, fileRow }): LevelRow => {
     const at = (column: LevelNotesColumn): string => values[columns.get(column) ?? -1]?.trim() ?? ''
     const row: LevelRow = { label: at('label') || at('station') || `row ${fileRow}` }
@@ -48,12 +69,13 @@ export function parseLevelNotesCsv({ text }: { text: string }): LevelRow[] {
       if (written === '') continue
       const figure = read(written)
       if (figure === undefined) {
-        problems.push(`Row ${fileRow}, column ${column}: "${written}" is not a number such as ${example}.`)
+        const message = `Row ${fileRow}, column ${column}: "${written}" is not a number such as ${example}.`
+        errors.push({ row: fileRow, column, message })
       } else row[key] = figure
     }
     return row
   })
-  return problems.length > 0 ? refuse(problems) : rows
+  return { rows, errors }
 }
 
 interface Line {
