@@ -12,6 +12,8 @@ export interface SurveyView {
   /** Reduced from the notes, or as typed. */
   groundLine: { stationFt: number; elevationFt: number }[]
   reduction: SurveyReduction | null
+  /** What the notes leave open, such as a misclosure, in whole sentences. */
+  remarks?: string[]
 }
 
 export interface SurveyReduction {

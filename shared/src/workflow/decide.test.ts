@@ -180,6 +180,28 @@ describe('signing', () => {
   })
 })
 
+describe('a design that several people saved', () => {
+  const facts: JobFacts = { ...openFacts, designerIds: [designer, 'second'] }
+
+  it('may be checked by none of them', () => {
+    const checked: JobFacts = { ...facts, technicalCheck: { checkerId: 'second', withinLimits: true } }
+    const planner: Actor = { personId: 'planner', districtId: 'district', roles: ['planner'] }
+    expect(decide(checked, 'send-to-landowner', planner, fullRequest)).toMatchObject({
+      allowed: false,
+      reasons: [expect.stringContaining('made by the designer')],
+    })
+  })
+
+  it('may be approved by none of them', () => {
+    const signed: JobFacts = { ...facts, state: 'with-supervisor', signedByIds: [landowner] }
+    const supervisor: Actor = { personId: 'second', districtId: 'district', roles: ['supervisor'] }
+    expect(decide(signed, 'approve', supervisor, fullRequest)).toMatchObject({ allowed: false })
+    expect(decide(signed, 'approve', { ...supervisor, personId: 'third' }, fullRequest)).toMatchObject({
+      allowed: true,
+    })
+  })
+})
+
 describe('the graph of states', () => {
   it('reaches every state from draft', () => {
     const reached = new Set<JobState>(['draft'])

@@ -15,6 +15,9 @@ const given = (
 
 const counted = (count: number, one: string, many: string): string => `${count} ${count === 1 ? one : many}`
 
+const designed = (f: JobFacts, personId: string): boolean =>
+  personId === f.designerId || (f.designerIds ?? []).includes(personId)
+
 const filled = (text: string | undefined): boolean => (text ?? '').trim().length > 0
 
 export const guards = {
@@ -27,7 +30,7 @@ export const guards = {
     unless(f.technicalCheck !== null, 'The technical check of this packet is not done yet.'),
   checkerDidNotDesign: (f) =>
     unless(
-      f.technicalCheck === null || f.technicalCheck.checkerId !== f.designerId,
+      f.technicalCheck === null || !designed(f, f.technicalCheck.checkerId),
       'The technical check was made by the designer. Another person must check it.',
     ),
   checkerWithinLimits: (f) =>
@@ -65,7 +68,7 @@ export const guards = {
     given(r, (q) => (q.notes ?? 0) > 0, 'Write at least one note that says what should change.'),
   hasReason: (_f, _a, r) => given(r, (q) => filled(q.reason), 'Give a reason.'),
   notDesigner: (f, a) =>
-    unless(a.personId !== f.designerId, 'You made this design. Another person must decide.'),
+    unless(!designed(f, a.personId), 'You made this design. Another person must decide.'),
   notPayeeOrKin: (f, a) =>
     unless(
       !f.payeeAndKinIds.includes(a.personId),

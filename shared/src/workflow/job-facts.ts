@@ -10,6 +10,8 @@ export interface JobFacts {
   readonly state: JobState
   /** Who made the chosen design. */
   readonly designerId: string | null
+  /** Everyone who ever saved it: somebody who changed one figure has designed it too. */
+  readonly designerIds?: readonly string[]
   /** Producers who are paid by this job, and their kin as recorded. */
   readonly payeeAndKinIds: readonly string[]
   /** Packet A of the chosen design as it stands now; null when there is none or the design moved on. */
