@@ -11,7 +11,11 @@ export default defineConfig({
     strictPort: true,
     proxy: { '/api': process.env.API_ADDRESS ?? 'http://127.0.0.1:3000' },
   },
-  build: { target: 'es2022' },
+  build: {
+    target: 'es2022',
+    // shared is pure, so what a page does not use of it is left out of its file.
+    rolldownOptions: { treeshake: { moduleSideEffects: (id) => !id.includes('/shared/src/') } },
+  },
   test: {
     environment: 'jsdom',
     include: ['src/**/*.test.{ts,tsx}'],
