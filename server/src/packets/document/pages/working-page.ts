@@ -1,0 +1,58 @@
+import { trimmedNumber, type WorkingFigure } from 'shared'
+import type { Block, PageDraft, TableRow } from '../layout/block.js'
+import type { PacketSource } from '../packet-source.js'
+
+/** How every figure was found: formula, the numbers put in, result, source. */
+export function workingPage({ result }: PacketSource): PageDraft {
+  const parts = [...new Set(result.working.map(({ part }) => part))]
+  const rows = parts.flatMap((part): TableRow[] => [
+    { kind: 'part', cells: [partWords[part]] },
+    ...result.working.filter((figure) => figure.part === part).map(figureRow),
+  ])
+  const blocks: Block[] = [
+    {
+      kind: 'paragraph',
+      text: 'Each figure with its formula and the numbers put in, so that anyone can follow it with a pencil. Numbers are shown to four places; nothing but money was rounded on the way.',
+    },
+    {
+      kind: 'table',
+      columns: [
+        { title: 'Figure', share: 22 },
+        { title: 'Formula and numbers', share: 42 },
+        { title: 'Result', share: 14, align: 'right' },
+        { title: 'Source', share: 22 },
+      ],
+      rows,
+    },
+  ]
+  return { title: 'Appendix: working', blocks }
+}
+
+const partWords: { readonly [part in WorkingFigure['part']]: string } = {
+  herd: 'Herd and water',
+  profile: 'Ramp',
+  earthwork: 'Earthwork',
+  rock: 'Rock',
+  fabric: 'Fabric',
+  approachPad: 'Approach pad',
+  closingPanel: 'Closing panel',
+  fence: 'Fence',
+  runoff: 'Runoff',
+  berm: 'Berm',
+  pond: 'Pond',
+  seeding: 'Seeding',
+}
+
+function figureRow({ label, formula, numbers, result, unit, source }: WorkingFigure): TableRow {
+  const put = numbers.map(
+    ({ name, value, unit: own }) => `${name} = ${trimmedNumber(value, 4)}${own ? ` ${own}` : ''}`,
+  )
+  return {
+    cells: [
+      label,
+      [formula, put.join('; ')].filter(Boolean).join('\n'),
+      `${trimmedNumber(result, 4)} ${unit}`.trim(),
+      source,
+    ],
+  }
+}
