@@ -13,7 +13,7 @@ export interface LabelRoom {
   isFree: (text: TextShape) => boolean
   /** Whether a stroke runs clear of every label and stroke. */
   isLineFree: (line: readonly Point[]) => boolean
-  /** The first text that fits; the last one when none does, since a crowded label beats a missing one. */
+  /** The first text that fits. None when all are taken: the words and the table of the sheet still name the thing. */
   firstFree: <Item extends { text: TextShape }>(candidates: readonly Item[]) => Item | undefined
 }
 
@@ -38,6 +38,6 @@ export function labelRoom(clip: Box): LabelRoom {
     takeLine: (line) => lines.push(line),
     takeBox: (box) => taken.push(box),
     isFree,
-    firstFree: (candidates) => candidates.find(({ text }) => isFree(text)) ?? candidates.at(-1),
+    firstFree: (candidates) => candidates.find(({ text }) => isFree(text)),
   }
 }

@@ -41,10 +41,11 @@ export function profileLevels(model: SheetModel, view: View, room: LabelRoom): S
     }))
     const inWater = places.filter(({ text }) => textBox(text).left > start.x + 2)
     const place = room.firstFree(inWater)
-    if (!place) return []
+    const line = polyline([start, end], level.stroke, `level-${level.label.split(' ')[0]}`)
+    if (!place) return [line]
     const ground = level.elevationFt === model.site.fullPoolElevationFt ? 'paper' : 'waterTint'
     const mark = levelMark({ at: place.at, label: level.label, ground })
     room.take(mark)
-    return [polyline([start, end], level.stroke, `level-${level.label.split(' ')[0]}`), ...mark]
+    return [line, ...mark]
   })
 }

@@ -10,13 +10,15 @@ interface ProfileViewRequest {
   title: string
   mostExaggeration: number
   scaleFtPerInch?: number
+  /** Paper left free above the highest thing, for dimensions and names. */
+  headroomMm?: number
 }
 
 /** Feet of room past the work on either side, below the deepest point and above the highest. */
 const ROOM = { landwardFt: 6, waterwardFt: 14, belowFt: 1.5, aboveFt: 1 }
 
 /** A window around the work, not the whole survey: a long approach would make the ramp a small thing. */
-export function profileView({ model, clip, ...rest }: ProfileViewRequest): View {
+export function profileView({ model, clip, headroomMm = 0, ...rest }: ProfileViewRequest): View {
   const ground = existingLine(model)
   const work = [...finishedLine(model), ...endLine(model), ...bermOutline(model)]
   const workStations = [...work.map((p) => p.x), model.closing?.stationFt, model.pad?.fromStationFt].filter(
@@ -31,8 +33,13 @@ export function profileView({ model, clip, ...rest }: ProfileViewRequest): View 
     : -Infinity
   const bottom = Math.min(...seen, model.profile.toeElevationFt - thickness) - ROOM.belowFt
   const top = Math.max(...seen, panelTop) + ROOM.aboveFt
-  const view = makeView({ ...rest, clip, window: { from: { x: from, y: bottom }, to: { x: to, y: top } } })
-  return withinSurvey(view, ground)
+  const under = { ...clip, top: clip.top + headroomMm }
+  const view = makeView({
+    ...rest,
+    clip: under,
+    window: { from: { x: from, y: bottom }, to: { x: to, y: top } },
+  })
+  return withinSurvey({ ...view, clip }, ground)
 }
 
 /** Where the scale leaves room to spare, it is given to surveyed ground rather than to blank paper. */

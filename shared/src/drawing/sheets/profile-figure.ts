@@ -17,7 +17,7 @@ const SIDE_MM = 12
 export function profileFigure({ model, widthMm, heightMm }: ProfileFigure): Sheet {
   const clip = { left: SIDE_MM, top: 2, right: widthMm - SIDE_MM, bottom: heightMm - 2 }
   const title = 'Profile on the center line'
-  const view = profileView({ model, clip, key: 'profile', title, mostExaggeration: 3 })
+  const view = profileView({ model, clip, key: 'profile', title, mostExaggeration: 3, headroomMm: 20 })
   return {
     key: 'profile-figure',
     title: `${title}. ${view.scaleNote}`,

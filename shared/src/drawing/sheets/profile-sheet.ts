@@ -28,6 +28,7 @@ export function profileSheet(model: SheetModel, title: SheetTitle): Sheet {
     key: 'profile',
     title: 'Profile on the center line',
     mostExaggeration: 3,
+    headroomMm: 20,
   })
   const plain = profileView({
     model,
