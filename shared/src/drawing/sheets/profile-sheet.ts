@@ -47,7 +47,7 @@ export function profileSheet(model: SheetModel, title: SheetTitle): Sheet {
     border: sheetBorder,
     views: [main, plain],
     shapes: [
-      ...profileHeading(main),
+      ...profileHeading(main, model),
       ...profileShapes(model, main),
       ...bandShapes(model, main),
       ...viewHeading({ x: sheetRoom.left, y: 139.5 }, plain.title, plain.scaleNote),
@@ -74,8 +74,13 @@ export function profileSheet(model: SheetModel, title: SheetTitle): Sheet {
   }
 }
 
-const profileHeading = (view: View): Shape[] => [
-  ...viewHeading({ x: sheetRoom.left, y: 17.5 }, view.title, view.scaleNote),
+/** The grade stands here too, level, since along the slope it is hard to search for and to copy. */
+const profileHeading = (view: View, { ramp }: SheetModel): Shape[] => [
+  ...viewHeading(
+    { x: sheetRoom.left, y: 17.5 },
+    view.title,
+    `${view.scaleNote}. Grade ${gradeText(ramp.gradeRunPerRise)}`,
+  ),
   ...scaleBar({ view, right: { x: sheetRoom.right - 4, y: 16.5 } }),
 ]
 

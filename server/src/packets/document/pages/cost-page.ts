@@ -51,9 +51,9 @@ function fundingBlocks({ result }: PacketSource): Block[] {
     {
       kind: 'table',
       columns: [
-        { title: 'Who', share: 54 },
-        { title: 'Offered', share: 22, align: 'right' },
-        { title: 'Pays', share: 24, align: 'right' },
+        { title: 'Who', share: 66 },
+        { title: 'Offered', share: 17, align: 'right' },
+        { title: 'Pays', share: 17, align: 'right' },
       ],
       rows: [
         ...funding.sources.flatMap(sourceRows),
@@ -76,7 +76,8 @@ function sourceRows(source: FundedSource): TableRow[] {
     cells: [`   less: ${cut.reason}`, `−${moneyText(cut.amount)}`, ''],
   }))
   return [
-    { cells: [`${source.name}: ${howItPays(source)}`, moneyText(source.offered), moneyText(source.paid)] },
+    { cells: [source.name, moneyText(source.offered), moneyText(source.paid)] },
+    { cells: [`   ${howItPays(source)}`, '', ''] },
     ...cuts,
   ]
 }

@@ -30,7 +30,10 @@ export function renderPacket(packet: PacketDocument): Promise<Uint8Array> {
     },
   })
   const bytes = collect(doc)
-  packet.pages.forEach((page) => drawPage(doc, page))
+  const whole = doc.struct('Document')
+  doc.addStructure(whole)
+  packet.pages.forEach((page) => drawPage(doc, page, whole))
+  whole.end()
   doc.end()
   return bytes
 }
@@ -44,7 +47,7 @@ function collect(doc: Doc): Promise<Uint8Array> {
   })
 }
 
-function drawPage(doc: Doc, page: PacketPage): void {
+function drawPage(doc: Doc, page: PacketPage, whole: PDFKit.PDFStructureElement): void {
   doc.addPage({ size: [page.widthMm * POINTS_PER_MM, page.heightMm * POINTS_PER_MM], margin: 0 })
   doc.outline.addItem(page.title)
   doc.lineJoin('round')
@@ -52,7 +55,13 @@ function drawPage(doc: Doc, page: PacketPage): void {
   doc.markContent('Artifact', { type: 'Layout' })
   drawShapes(doc, page.art)
   doc.endMarkedContent()
-  page.nodes.forEach((one) => doc.addStructure(structureOf(doc, one)))
+  whole.add(
+    doc.struct(
+      'Sect',
+      {},
+      page.nodes.map((one) => structureOf(doc, one)),
+    ),
+  )
   doc.markContent('Artifact', { type: 'Pagination' })
   drawShapes(doc, page.furniture)
   doc.endMarkedContent()
