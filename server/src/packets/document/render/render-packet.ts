@@ -4,6 +4,7 @@ import { POINTS_PER_MM } from '../theme.js'
 import { structureOf } from './draw-nodes.js'
 import { drawShapes } from './draw-shapes.js'
 import { fonts } from './fonts.js'
+import { shareLayouts } from './share-layouts.js'
 
 type Doc = PDFKit.PDFDocument
 
@@ -29,6 +30,7 @@ export function renderPacket(packet: PacketDocument): Promise<Uint8Array> {
       ModDate: made,
     },
   })
+  Object.values(fonts).forEach((face) => shareLayouts(doc, face))
   const bytes = collect(doc)
   const whole = doc.struct('Document')
   doc.addStructure(whole)
