@@ -2,6 +2,7 @@ import {
   civilDateText,
   crossSectionsSheet,
   detailsSheet,
+  levelNames,
   numberText,
   planSheet,
   profileSheet,
@@ -115,7 +116,10 @@ function sheetTitle(source: PacketSource, sheet: { number: number; count: number
     designedBy: source.designerName,
     designedOn: civilDateText(source.madeAt),
     checkedBy: 'see the evidence page',
-    levels: fullPool === undefined ? 'local' : `full pool = ${numberText(fullPool, 2)} ft, local`,
+    levels:
+      fullPool === undefined
+        ? 'local'
+        : `${levelNames[job.body].high} = ${numberText(fullPool, 2)} ft, local`,
     isExample: district.isDemo,
   }
 }

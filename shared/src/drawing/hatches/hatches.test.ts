@@ -31,7 +31,7 @@ describe('stoneHatch', () => {
   })
 
   it('draws fewer and larger stones rather than ever more small ones', () => {
-    expect(hatch(3, 0.05).rings.length).toBeLessThanOrEqual(900)
+    expect(hatch(3, 0.05).rings.length).toBeLessThanOrEqual(600)
   })
 
   it('covers most of the ground with stone, and never more than there is', () => {

@@ -14,7 +14,7 @@ interface StoneHatch {
   seed: number
 }
 
-const MOST_STONES = 900
+const MOST_STONES = 600
 
 /** On paper a stone is never drawn smaller than an eye and a printer can tell apart from its neighbours. */
 export const stoneOnPaperMm = (stoneSizeIn: number, mmPerFt: number) =>

@@ -2,6 +2,7 @@ import { earthHatch } from '../hatches/earth-hatch.js'
 import { stoneHatch } from '../hatches/stone-hatch.js'
 import { waterHatch } from '../hatches/water-hatch.js'
 import { ringOf } from '../geometry/boxes.js'
+import { levelNames } from '../level-names.js'
 import { pens, typeMm } from '../pens.js'
 import { polygon, polyline, textAt } from '../shape-makers.js'
 import type { Box, Point, Shape, Stroke, Tone } from '../shapes.js'
@@ -60,7 +61,11 @@ const swatches = {
 export type LegendKey = keyof typeof swatches
 
 /** Every hatch and line of the sheet with its name, in columns of three. */
-export function legend(box: Box, keys: readonly LegendKey[]): Shape[] {
+export function legend(box: Box, keys: readonly LegendKey[], body: keyof typeof levelNames): Shape[] {
+  const names: { readonly [key: string]: string } = {
+    fullPool: levelNames[body].high,
+    lowWater: levelNames[body].low,
+  }
   const rows = 3
   const columns = Math.ceil(keys.length / rows)
   const columnMm = (box.right - box.left) / columns
@@ -75,7 +80,11 @@ export function legend(box: Box, keys: readonly LegendKey[]): Shape[] {
       top: middle - SWATCH.heightMm / 2,
       bottom: middle + SWATCH.heightMm / 2,
     }
-    const label = textAt(name, { x: swatch.right + 2, y: middle + 1.1 }, { sizeMm: typeMm.small })
+    const label = textAt(
+      names[key] ?? name,
+      { x: swatch.right + 2, y: middle + 1.1 },
+      { sizeMm: typeMm.small },
+    )
     return [...draw(swatch), label]
   })
 }

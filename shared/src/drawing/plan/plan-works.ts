@@ -60,11 +60,13 @@ export function planWorks(model: SheetModel, axis: PlanAxis, view: View): Shape[
   const half = model.ramp.widthFt / 2
   const { topStationFt, toeStationFt } = model.profile
   const stoneMm = stoneOnPaperMm(model.layers[0]?.stoneSizeIn ?? 2, view.horizontalMmPerFt)
+  // On a small plan stones would be dust: the tone alone says rock.
+  const hasStones = view.horizontalMmPerFt >= 0.5
   const rock = (strip: Strip, seed: number) => {
     const ring = lineToPaper(view, stripRing(axis, strip))
     return [
       polygon(ring, { fill: 'stone' }),
-      stoneHatch({ ring, stoneMm, slope: 0, seed }),
+      ...(hasStones ? [stoneHatch({ ring, stoneMm, slope: 0, seed })] : []),
       polygon(ring, { stroke: pens.outline }),
     ]
   }

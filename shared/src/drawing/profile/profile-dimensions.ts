@@ -2,6 +2,7 @@ import { feetAndInches } from '../../format/feet-and-inches.js'
 import { formatPercent } from '../../format/format-percent.js'
 import { formatRatio } from '../../format/format-ratio.js'
 import { boundsOf, insetBox } from '../geometry/boxes.js'
+import { levelNames } from '../level-names.js'
 import type { LabelRoom } from '../label-room.js'
 import { levelAt } from '../level-at.js'
 import { dimension } from '../marks/dimension.js'
@@ -33,7 +34,7 @@ export function profileDimensions(model: SheetModel, view: View, room: LabelRoom
     })
   }
   const slope = `Ramp ${feetAndInches(profile.runFt)} level, ${feetAndInches(profile.slopeLengthFt)} on the slope`
-  const wet = `under water at full pool ${feetAndInches(profile.wetRunAtFullFt)}`
+  const wet = `under water at ${levelNames[model.site.body].high} ${feetAndInches(profile.wetRunAtFullFt)}`
   const shapes = [
     ...(pad ? across(pad.fromStationFt, pad.toStationFt, 0, `Pad ${feetAndInches(pad.lengthFt)}`) : []),
     ...across(profile.topStationFt, profile.toeStationFt, 0, slope, 'run'),

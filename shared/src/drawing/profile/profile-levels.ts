@@ -1,4 +1,5 @@
 import { numberText } from '../../format/number-text.js'
+import { atSentenceStart, levelNames } from '../level-names.js'
 import type { LabelRoom } from '../label-room.js'
 import { levelMark, levelMarkText } from '../marks/level-mark.js'
 import { pens } from '../pens.js'
@@ -18,14 +19,20 @@ interface WaterLevel {
 export function waterLevels(model: SheetModel): WaterLevel[] {
   const { site, profile } = model
   const low = site.lowWaterElevationFt ?? site.fullPoolElevationFt - (site.drawdownFt ?? 4)
+  const names = levelNames[site.body]
   const level = (label: string, elevationFt: number, fromStationFt: number | undefined, stroke: Stroke) =>
     fromStationFt === undefined
       ? []
       : [{ label: `${label} ${numberText(elevationFt, 2)}`, elevationFt, fromStationFt, stroke }]
   return [
-    ...level('Full pool', site.fullPoolElevationFt, profile.fullPoolEdgeStationFt, pens.fullPool),
+    ...level(
+      atSentenceStart(names.high),
+      site.fullPoolElevationFt,
+      profile.fullPoolEdgeStationFt,
+      pens.fullPool,
+    ),
     ...level('While building', site.waterSurfaceTodayFt, profile.waterTodayEdgeStationFt, pens.waterToday),
-    ...level('Low water', low, profile.lowWaterEdgeStationFt, pens.lowWater),
+    ...level(atSentenceStart(names.low), low, profile.lowWaterEdgeStationFt, pens.lowWater),
   ]
 }
 

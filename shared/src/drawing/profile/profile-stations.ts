@@ -1,4 +1,5 @@
 import { numberText } from '../../format/number-text.js'
+import { levelNames } from '../level-names.js'
 import { levelAt } from '../level-at.js'
 import type { SheetModel } from '../sheet-model.js'
 import { stationLabel } from '../station-label.js'
@@ -13,14 +14,15 @@ export interface ProfileStation {
 /** The stations a builder sets out: every place where the finished surface changes or meets a water level. */
 export function profileStations(model: SheetModel): ProfileStation[] {
   const { profile, pad, berm, closing } = model
+  const names = levelNames[model.site.body]
   const last = model.ground.at(-1)?.stationFt ?? Infinity
   const named: [string, number | undefined, 'finished' | 'berm' | 'none'][] = [
     ['berm crest', berm?.plan.crestStationFt, 'berm'],
     ['pad', pad?.fromStationFt, 'none'],
     ['ramp top', profile.topStationFt, 'finished'],
-    ['full pool', profile.fullPoolEdgeStationFt, 'finished'],
+    [names.high, profile.fullPoolEdgeStationFt, 'finished'],
     ['building', profile.waterTodayEdgeStationFt, 'finished'],
-    ['low water', profile.lowWaterEdgeStationFt, 'finished'],
+    [names.low, profile.lowWaterEdgeStationFt, 'finished'],
     ['toe', profile.toeStationFt, 'finished'],
     ['panel', closing?.stationFt, 'none'],
   ]

@@ -1,4 +1,5 @@
 import type { EarthSection } from '../../engineering/design/ramp-shapes.js'
+import { levelNames } from '../level-names.js'
 import { stationLabel } from '../station-label.js'
 import type { SheetModel } from '../sheet-model.js'
 
@@ -16,6 +17,7 @@ export function sectionStations(model: SheetModel): ChosenSection[] {
     ({ part }) => part !== 'approach' && part !== 'end-cut' && part !== 'nose',
   )
   const { profile } = model
+  const names = levelNames[model.site.body]
   const nearest = (stationFt: number) =>
     sections.reduce<EarthSection | undefined>(
       (best, section) =>
@@ -35,8 +37,8 @@ export function sectionStations(model: SheetModel): ChosenSection[] {
     ['top of the ramp', nearest(profile.topStationFt)],
     ['toe', nearest(profile.toeStationFt)],
     ['most fill', most(({ fillAreaFt2 }) => fillAreaFt2)],
-    ['near full pool', nearest(profile.fullPoolEdgeStationFt)],
-    ['near low water', nearest(profile.lowWaterEdgeStationFt)],
+    [`near ${names.high}`, nearest(profile.fullPoolEdgeStationFt)],
+    [`near ${names.low}`, nearest(profile.lowWaterEdgeStationFt)],
     ['midway', nearest((profile.topStationFt + profile.toeStationFt) / 2)],
   ]
   const chosen: ChosenSection[] = []

@@ -46,7 +46,7 @@ export function crossSectionsSheet(model: SheetModel, title: SheetTitle): Sheet 
       ),
       ...(first ? scaleBar({ view: first, right: { x: sheetRoom.right - 4, y: 16.5 }, roomMm: 34 }) : []),
       ...drawn.flatMap(({ shapes }) => shapes),
-      ...sheetFrame(title, [
+      ...sheetFrame(model, title, [
         'existing',
         'finished',
         'fabric',

@@ -47,7 +47,7 @@ export function planSheet(model: SheetModel, title: SheetTitle): Sheet {
       ...worksShapes(model, axis, works),
       ...(whole ? wholeShapes(model, axis, whole) : []),
       ...notes(model, axis, right),
-      ...sheetFrame(title, ['surface', 'fill', 'water', 'fullPool', 'fence', 'closing']),
+      ...sheetFrame(model, title, ['surface', 'fill', 'water', 'fullPool', 'fence', 'closing']),
     ],
     words: planWords(model, axis),
     table: { columns: ['Fence run', 'What'], rows: fenceWords(model).map((line) => splitOnce(line)) },

@@ -10,6 +10,7 @@ import { profileRock } from '../profile/profile-rock.js'
 import { profileShapes } from '../profile/profile-shapes.js'
 import { profileStations, stationCells, stationRows } from '../profile/profile-stations.js'
 import { profileView } from '../profile/profile-view.js'
+import { atSentenceStart, levelNames } from '../level-names.js'
 import type { SheetModel } from '../sheet-model.js'
 import type { Box, Shape, Sheet, View } from '../shapes.js'
 import { polyline } from '../shape-makers.js'
@@ -57,7 +58,7 @@ export function profileSheet(model: SheetModel, title: SheetTitle): Sheet {
         ...profileLines(model, plain),
         ...poolLine(model, plain),
       ]),
-      ...sheetFrame(title, [
+      ...sheetFrame(model, title, [
         'existing',
         'finished',
         'fabric',
@@ -104,9 +105,10 @@ function poolLine(model: SheetModel, view: View): Shape[] {
 
 function profileWords(model: SheetModel, view: View): string[] {
   const { profile, ramp, site, pad, berm, closing } = model
+  const names = levelNames[site.body]
   return [
     `The ramp is ${feetAndInches(ramp.widthFt)} wide and falls at ${gradeText(ramp.gradeRunPerRise)} from elevation ${numberText(profile.topElevationFt, 2)} ft to ${numberText(profile.toeElevationFt, 2)} ft: ${feetAndInches(profile.runFt)} measured level, ${feetAndInches(profile.slopeLengthFt)} (${numberText(profile.slopeLengthFt, 2)} ft) along the slope.`,
-    `Full pool is ${numberText(site.fullPoolElevationFt, 2)} ft. At full pool ${feetAndInches(profile.wetRunAtFullFt)} of the ramp lies under water, at low water ${feetAndInches(profile.wetRunAtLowFt)}.`,
+    `${atSentenceStart(names.high)} is ${numberText(site.fullPoolElevationFt, 2)} ft. At ${names.high} ${feetAndInches(profile.wetRunAtFullFt)} of the ramp lies under water, at ${names.low} ${feetAndInches(profile.wetRunAtLowFt)}.`,
     ...model.layers.map(
       (layer) => `${layer.name}: ${numberText(layer.thicknessIn)} in thick, measured square to the slope.`,
     ),

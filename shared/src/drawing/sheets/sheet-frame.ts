@@ -3,6 +3,7 @@ import { legend, type LegendKey } from '../marks/legend.js'
 import { titleBlock, type SheetTitle } from '../marks/title-block.js'
 import { paper, pens, typeMm } from '../pens.js'
 import { polygon, polyline, textAt } from '../shape-makers.js'
+import type { SheetModel } from '../sheet-model.js'
 import type { Box, Point, Shape } from '../shapes.js'
 import { textWidthMm } from '../text-width.js'
 
@@ -22,13 +23,13 @@ export const sheetRoom: Box = {
 }
 
 /** Border, title block and legend: the same on every sheet. */
-export function sheetFrame(title: SheetTitle, keys: readonly LegendKey[]): Shape[] {
+export function sheetFrame(model: SheetModel, title: SheetTitle, keys: readonly LegendKey[]): Shape[] {
   const top = sheetBorder.bottom - BLOCK_MM.height
   const left = sheetBorder.right - BLOCK_MM.width
   const block = { left, top, right: sheetBorder.right, bottom: sheetBorder.bottom }
   const keysBox = { left: sheetRoom.left, top: top + 1.5, right: left - 2, bottom: sheetBorder.bottom - 1.5 }
   return [
-    ...legend(keysBox, keys),
+    ...legend(keysBox, keys, model.site.body),
     ...titleBlock(block, title),
     polyline(
       [

@@ -49,7 +49,7 @@ function checkRow(check: CheckResult): TableRow {
       withUnit(actualText(check.actual), unit),
       limitText(check),
       verdictWords[verdict],
-      [source, note].filter(Boolean).join('. '),
+      [source, note].filter(Boolean).join('; '),
     ],
   }
 }

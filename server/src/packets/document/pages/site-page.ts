@@ -1,4 +1,4 @@
-import { formatFeet, formatPercent, numberText, readyValue } from 'shared'
+import { atSentenceStart, formatFeet, formatPercent, levelNames, numberText, readyValue } from 'shared'
 import type { Block, PageDraft } from '../layout/block.js'
 import type { PacketSource } from '../packet-source.js'
 
@@ -43,11 +43,12 @@ function placeFacts({ job, plan }: PacketSource): Fact[] {
 function levelFacts({ plan }: PacketSource): Fact[] {
   const site = plan.site
   if (!site) return []
+  const names = levelNames[site.body]
   const level = (name: string, value: number | undefined): Fact[] =>
     value === undefined ? [] : [{ name, value: formatFeet(value, 2) }]
   return [
-    ...level('Full pool', site.fullPoolElevationFt),
-    ...level('Low water', site.lowWaterElevationFt),
+    ...level(atSentenceStart(names.high), site.fullPoolElevationFt),
+    ...level(atSentenceStart(names.low), site.lowWaterElevationFt),
     ...level('Water while building', site.waterSurfaceTodayFt),
     ...level('Flood pool', site.floodPoolElevationFt),
     ...level('Top of the dam', site.topOfDamElevationFt),
