@@ -10,6 +10,7 @@ import {
   TextColumn,
 } from '../platform/database/columns.js'
 import { RefersTo } from '../platform/database/references.js'
+import type { PacketDocument } from './document/packet-document.js'
 
 /** A is read and signed; B adds signatures and evidence after approval. Neither is made again once ready. */
 @Entity('packets')
@@ -31,7 +32,8 @@ export class Packet {
 
   @TextColumn() status: PacketStatus
 
-  @JsonColumn({ nullable: true }) view: unknown | null
+  /** The whole document, ready to draw; tens of kilobytes, so it is read only where it is drawn. */
+  @JsonColumn({ nullable: true, select: false }) view: PacketDocument | null
 
   @CountColumn({ nullable: true }) viewVersion: number | null
 

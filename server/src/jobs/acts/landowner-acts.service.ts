@@ -1,0 +1,54 @@
+import { Injectable } from '@nestjs/common'
+import type { Tx } from '../../platform/database/tx.js'
+import { SignaturesService } from '../../signatures/signatures.service.js'
+import type { ActContext, ActEffect } from './act-context.js'
+import { ActNotesService } from './act-notes.service.js'
+import { packetAOf } from './packet-of-act.js'
+
+/** What a signer's acts leave behind. */
+@Injectable()
+export class LandownerActs {
+  constructor(
+    private readonly signatures: SignaturesService,
+    private readonly notes: ActNotesService,
+  ) {}
+
+  async sign(tx: Tx, context: ActContext<'sign'>): Promise<ActEffect> {
+    const { packetId, sha256 } = packetAOf(context)
+    const { id } = await this.signatures.record(tx, {
+      jobId: context.job.id,
+      packetId,
+      packetSha256: sha256,
+      personId: context.actor.personId,
+      typedName: context.act.typedName,
+      ...context.origin,
+    })
+    return { facts: { signatureId: id, packetSha256: sha256 } }
+  }
+
+  async askForChanges(tx: Tx, context: ActContext<'ask-for-changes'>): Promise<ActEffect> {
+    const { note, page } = context.act
+    const noteId = await this.notes.write(tx, context, {
+      text: note,
+      ...(page === undefined ? {} : { page }),
+    })
+    return { facts: { noteIds: [noteId] } }
+  }
+
+  async takeSignatureBack(tx: Tx, context: ActContext<'take-signature-back'>): Promise<ActEffect> {
+    const { reason } = context.act
+    const { job, actor } = context
+    const signatureIds = await this.signatures.voidStanding(tx, {
+      jobId: job.id,
+      personId: actor.personId,
+      reason: `Taken back: ${reason}`,
+    })
+    const noteId = await this.notes.write(tx, context, { text: reason })
+    return { facts: { signatureIds, noteIds: [noteId] } }
+  }
+
+  async withdraw(tx: Tx, context: ActContext<'withdraw'>): Promise<ActEffect> {
+    const noteId = await this.notes.write(tx, context, { text: context.act.reason, isSettled: true })
+    return { facts: { noteIds: [noteId] } }
+  }
+}
