@@ -52,6 +52,10 @@ export const sitePlanSchema = z.strictObject({
   waterSurfaceTodayFt: elevationFt,
   floodPoolElevationFt: elevationFt.optional(),
   topOfDamElevationFt: elevationFt.optional(),
+  /** From ramp and lane in plan; left out where the water has none near by. */
+  distanceToDamFt: numberBetween(0, 10000, 'ft').optional(),
+  distanceToSpillwayFt: numberBetween(0, 10000, 'ft').optional(),
+  distanceToInflowFt: numberBetween(0, 10000, 'ft').optional(),
   soil: lineOfText(80).optional(),
   waterOutline: z
     .array(z.strictObject({ eastFt: z.number(), northFt: z.number() }))

@@ -1,17 +1,18 @@
 import type { CostEstimate } from '../../money/cost-estimate-result.js'
 import type { FundingResult } from '../../money/funding/funding-source.js'
 import type { CheckResult } from '../checks/check-result.js'
+import type { ClosingPanel } from '../ramp/closing-panel.js'
+import type { RampEarthwork } from '../ramp/ramp-earthwork.js'
+import type { RampProfile } from '../ramp/ramp-profile.js'
+import type { DesignPartName } from './design-parts.js'
 import type { PartResult } from './part-result.js'
 import type {
   ApproachPadValue,
   BermValue,
-  ClosingPanelValue,
-  EarthworkValue,
   FabricValue,
   FenceValue,
   HerdValue,
   PondValue,
-  ProfileValue,
   RockValue,
   RunoffValue,
   SeedingValue,
@@ -19,23 +20,27 @@ import type {
 import type { QuantityLine } from './quantity-line.js'
 import type { WorkingFigure } from './working-figure.js'
 
-/**
- * Everything that follows from a design input. A part that failed does not take the others with it, so that the
- * drawing stays on screen while a number is half typed. A ready part of null means: this job has none.
- */
-export interface DesignResult {
-  herd: PartResult<HerdValue>
-  profile: PartResult<ProfileValue>
-  earthwork: PartResult<EarthworkValue>
-  rock: PartResult<RockValue>
-  fabric: PartResult<FabricValue>
-  approachPad: PartResult<ApproachPadValue | null>
-  closingPanel: PartResult<ClosingPanelValue | null>
-  fence: PartResult<FenceValue>
-  runoff: PartResult<RunoffValue>
-  berm: PartResult<BermValue>
-  pond: PartResult<PondValue | null>
-  seeding: PartResult<SeedingValue>
+/** What each part comes to. Null means: this job has none. */
+export interface PartValues {
+  herd: HerdValue
+  profile: RampProfile
+  earthwork: RampEarthwork
+  rock: RockValue
+  fabric: FabricValue
+  approachPad: ApproachPadValue | null
+  closingPanel: ClosingPanel | null
+  fence: FenceValue
+  runoff: RunoffValue
+  berm: BermValue
+  pond: PondValue | null
+  seeding: SeedingValue
+}
+
+/** A part that failed does not take the others with it, so that the drawing stays while a number is half typed. */
+export type DesignPartResults = { [Part in DesignPartName]: PartResult<PartValues[Part]> }
+
+/** Everything that follows from a design input. */
+export interface DesignResult extends DesignPartResults {
   quantities: PartResult<QuantityLine[]>
   cost: PartResult<CostEstimate>
   funding: PartResult<FundingResult>

@@ -1,3 +1,9 @@
+import type { BermDesignResult } from '../berm/berm-design-types.js'
+import type { FabricLayout } from '../fabric/fabric-layout.js'
+import type { FabricTakeOff } from '../fabric/fabric-take-off.js'
+import type { FenceRunResult, FenceTakeOffResult } from '../fence/fence-result.js'
+import type { RockLayer, RockLayers } from '../rock/rock-layers.js'
+import type { DesignPeakResult } from '../runoff/design-peak-types.js'
 import type { ProfileValue, EarthworkValue } from './ramp-shapes.js'
 
 export type { ProfileValue, EarthworkValue }
@@ -21,43 +27,10 @@ export interface HerdValue {
   }
 }
 
-export interface RockLayerValue {
-  name: string
-  volumeFt3: number
-  volumeYd3: number
-  tons: number
-  orderTons: number
-  loads?: number
-  topDepthFt: number
-  bottomDepthFt: number
-}
-
-export interface RockValue {
-  layers: RockLayerValue[]
-  totalTons: number
-  totalOrderTons: number
-}
-
-export interface FabricDirection {
-  strips: number
-  stripLengthFt: number
-  grossAreaFt2: number
-  lapAreaFt2: number
-  trimAreaFt2: number
-  joints: { atFt: number; lapFt: number }[]
-  piecesPerStrip: number
-  rolls: number
-}
-
-export interface FabricValue {
-  coverWidthFt: number
-  coverLengthFt: number
-  netAreaFt2: number
-  along: FabricDirection
-  across: FabricDirection
-  recommended: 'along' | 'across'
-  reason: string
-}
+export type RockLayerValue = RockLayer
+export type RockValue = RockLayers
+export type FabricDirection = FabricLayout
+export type FabricValue = FabricTakeOff
 
 export interface ApproachPadValue {
   lengthFt: number
@@ -81,24 +54,8 @@ export interface ClosingPanelValue {
   posts: number
 }
 
-export interface FenceRunValue {
-  name: string
-  lengthFt: number
-  fencedLengthFt: number
-  pullsFt: number[]
-  corners: number
-  linePosts: number
-  inLineBraces: number
-  wireFt: number
-  hotWireFt: number
-}
-
-export interface FenceValue {
-  runs: FenceRunValue[]
-  setbackFt?: number
-  enclosedAreaFt2?: number
-  habitatAreaFt2?: number
-}
+export type FenceRunValue = FenceRunResult
+export type FenceValue = FenceTakeOffResult
 
 export interface RunoffValue {
   runoffDepthIn: number
@@ -108,27 +65,11 @@ export interface RunoffValue {
   designPeakCfs: number
   governs: 'graphical' | 'rational'
   notes: string[]
+  /** Each method with its own intermediate figures. */
+  methods: DesignPeakResult
 }
 
-export interface BermValue {
-  depthFt: number
-  capacityVelocityFtPerS: number
-  lowResistanceDepthFt: number
-  velocityFtPerS: number
-  froude: number
-  crestAboveChannelFt: number
-  settledHeightFt: number
-  builtHeightFt: number
-  upslopeReachFt: number
-  downslopeReachFt: number
-  areaFt2: number
-  earthYd3PerFt: number
-  lengthFt: number
-  earthCompactedYd3: number
-  earthBankYd3: number
-  channelFallFt: number
-  footprintFt2: number
-}
+export type BermValue = BermDesignResult
 
 export interface PondValue {
   storage: { averageEndAreaFt3: number[]; prismoidalFt3: number[] }
