@@ -1,14 +1,9 @@
-import { EngineeringInputError } from '../engineering-input-error.js'
 import type { RainfallTable } from './rainfall-table.js'
+import { refuseText } from './refuse-text.js'
 
 export type RainfallHeader = Pick<RainfallTable, 'units' | 'series' | 'volume' | 'latitude' | 'longitude'>
 
 const MM_WORDS = ['mm', 'millimeter', 'millimeters', 'millimetres']
-
-/** Refuses a rainfall file with one sentence; the field is always the file's text. */
-export function refuseText(message: string): never {
-  throw new EngineeringInputError({ field: 'text', message })
-}
 
 /**
  * What the lines above the table say. The unit stands only in the parenthesis of the first line.

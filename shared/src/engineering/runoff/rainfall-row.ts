@@ -1,4 +1,4 @@
-import { refuseText } from './rainfall-header.js'
+import { refuseText } from './refuse-text.js'
 
 export interface RainfallRow {
   label: string

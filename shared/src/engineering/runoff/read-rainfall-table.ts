@@ -1,7 +1,8 @@
 import Papa from 'papaparse'
-import { rainfallHeader, refuseText } from './rainfall-header.js'
+import { rainfallHeader } from './rainfall-header.js'
 import { rainfallRow, type RainfallRow } from './rainfall-row.js'
 import type { RainfallTable, ReadRainfallTableInput } from './rainfall-table.js'
+import { refuseText } from './refuse-text.js'
 
 const MOST_CHARACTERS = 200_000
 const MM_PER_IN = 25.4
