@@ -6,7 +6,7 @@ import { UnitOfWork } from '../platform/database/unit-of-work.js'
 import { EventLog } from '../platform/events/event-log.service.js'
 import { FileStore } from '../platform/storage/file-store.service.js'
 import { PacketDraftService } from './packet-draft.service.js'
-import { PacketRenderer } from './document/render/packet-renderer.js'
+import { PacketRendererService } from './packet-renderer.service.js'
 import { Packet } from './packet.entity.js'
 import type { RenderPacketPayload } from './render-packet-task.js'
 import { revisionNumber } from './revision-number.js'
@@ -20,7 +20,7 @@ export class RenderPacketService {
   constructor(
     private readonly work: UnitOfWork,
     private readonly drafts: PacketDraftService,
-    private readonly renderer: PacketRenderer,
+    private readonly renderer: PacketRendererService,
     private readonly files: FileStore,
     private readonly access: JobAccessService,
     private readonly jobs: JobsService,

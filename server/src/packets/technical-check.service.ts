@@ -1,5 +1,5 @@
 import { Injectable } from '@nestjs/common'
-import { Problem, type JobFacts } from 'shared'
+import { guards, Problem, type Actor, type JobFacts } from 'shared'
 import { Membership } from '../accounts/membership.entity.js'
 import { Revision } from '../designs/revision.entity.js'
 import type { Asking } from '../jobs/job-access.service.js'
@@ -32,7 +32,7 @@ export class TechnicalCheckService {
     const { packet, job } = await this.packets.find(tx, asking, wanted)
     this.jobs.requireEditable(job)
     const checkerId = asking.actor.personId
-    refuseCheck(packet, await this.jobFacts.factsOf(tx, job), checkerId)
+    refuseCheck(packet, await this.jobFacts.factsOf(tx, job), asking.actor)
     const revision = await tx.manager.findOneByOrFail(Revision, {
       districtId: tx.districtId,
       id: packet.revisionId,
@@ -57,18 +57,15 @@ export class TechnicalCheckService {
   }
 }
 
-function refuseCheck(packet: Packet, facts: JobFacts, checkerId: string): void {
+/** The same two rules as for the approval: nobody judges an own design or a job that pays them. */
+function refuseCheck(packet: Packet, facts: JobFacts, actor: Actor): void {
   const reasons = [
-    ...(facts.packetA?.id === packet.id
-      ? []
-      : ['This is not the packet of the design as it stands. Open the newest revision.']),
-    ...(packet.status === 'ready' ? [] : ['The packet is not made yet.']),
-    ...((facts.designerIds ?? [facts.designerId]).includes(checkerId)
-      ? ['You made this design. Another person must check it.']
-      : []),
-    ...(facts.payeeAndKinIds.includes(checkerId)
-      ? ['You or your kin are paid by this job. Another person must check it.']
-      : []),
-  ]
+    facts.packetA?.id === packet.id
+      ? null
+      : 'This is not the packet of the design as it stands. Open the newest revision.',
+    packet.status === 'ready' ? null : 'The packet is not made yet.',
+    guards.notDesigner(facts, actor, null),
+    guards.notPayeeOrKin(facts, actor, null),
+  ].filter((reason) => reason !== null)
   if (reasons.length > 0) throw new Problem('transition-not-allowed', { reasons })
 }
