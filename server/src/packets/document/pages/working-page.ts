@@ -17,10 +17,10 @@ export function workingPage({ result }: PacketSource): PageDraft {
     {
       kind: 'table',
       columns: [
-        { title: 'Figure', share: 22 },
-        { title: 'Formula and numbers', share: 42 },
+        { title: 'Figure', share: 20 },
+        { title: 'Formula and numbers', share: 41 },
         { title: 'Result', share: 14, align: 'right' },
-        { title: 'Source', share: 22 },
+        { title: 'Source', share: 26 },
       ],
       rows,
     },
