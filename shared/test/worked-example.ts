@@ -125,7 +125,8 @@ export const workedPlan: DesignPlan = {
     seepageInPerDay: 0.125,
   },
   seeding: {
-    extraDisturbedAreaFt2: 992,
+    // Spoil, pad and what the crew treads down, so that the whole comes to 3,566.47 ft².
+    extraDisturbedAreaFt2: 2324.5156,
     mulchTonsPerAcre: 2,
     mix: [
       {

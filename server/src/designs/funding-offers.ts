@@ -1,18 +1,13 @@
-import {
-  EngineeringInputError,
-  sourceFromSchedule,
-  type DesignPlan,
-  type FundingSource,
-  type ScheduleView,
-} from 'shared'
+import { EngineeringInputError, sourceFromSchedule, type DesignPlan, type FundingSource } from 'shared'
 import type { RulesInForce } from './rules-in-force.js'
+import type { ScheduleInForce } from './schedule-in-force.js'
 
 type FundingChoice = NonNullable<DesignPlan['funding']>['sources'][number]
 
 /** A fund the plan names: its terms as they are in force, or the sentence that says why it cannot pay. */
 export interface FundingOffer {
   choice: FundingChoice
-  schedule: ScheduleView | null
+  schedule: ScheduleInForce | null
   source: FundingSource | null
   trouble: string | null
 }
@@ -30,7 +25,7 @@ export function fundingOffers(plan: DesignPlan, rules: RulesInForce): FundingOff
 }
 
 function sourceOrTrouble(
-  schedule: ScheduleView,
+  schedule: ScheduleInForce,
   choice: FundingChoice,
 ): Pick<FundingOffer, 'source' | 'trouble'> {
   try {

@@ -1,12 +1,11 @@
-import { Problem, type DesignResult, type ScheduleView } from 'shared'
+import { Problem, type DesignResult } from 'shared'
 import { fundingOffers } from './funding-offers'
 import { pointerOf, refuseEmptySettings, refuseIncomplete, refuseUnmapped } from './refuse-unready'
 import type { RulesInForce } from './rules-in-force'
+import type { ScheduleInForce } from './schedule-in-force'
 
-const schedule: ScheduleView = {
+const schedule: ScheduleInForce = {
   id: '00000000-0000-4000-8000-000000000001',
-  status: 'in-force',
-  version: 2,
   key: 'creek-fund',
   name: 'Creek fund',
   fiscalYear: 2026,

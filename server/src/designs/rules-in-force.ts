@@ -1,4 +1,5 @@
-import type { CostListView, CriteriaSetView, ScheduleView } from 'shared'
+import type { CostListView, CriteriaSetView } from 'shared'
+import type { ScheduleInForce } from './schedule-in-force.js'
 
 /** A setting as stored, with the words its catalogue gives it. */
 export interface SettingInForce {
@@ -16,6 +17,6 @@ export interface RulesInForce {
   criteriaSet: Pick<CriteriaSetView, 'id' | 'name' | 'criteria'> | null
   costList: Pick<CostListView, 'id' | 'name' | 'lines'> | null
   /** By the keys that the plan names; one that is not in force is missing here. */
-  schedules: readonly ScheduleView[]
+  schedules: readonly ScheduleInForce[]
   settings: readonly SettingInForce[]
 }

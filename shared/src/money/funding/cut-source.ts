@@ -3,7 +3,7 @@ import { allocateMoney } from '../allocate-money.js'
 import { Exact, exactSum, type ExactNumber } from '../exact.js'
 import { halfUpToCents } from '../half-up-to-cents.js'
 import { requireDecimal } from '../require-decimal.js'
-import { subtractMoney } from '../money-arithmetic.js'
+import { noMoney, subtractMoney } from '../money-arithmetic.js'
 import type { FundingCut, FundingSource } from './funding-source.js'
 import type { PaidSoFar, Share, StackRule } from './stack-state.js'
 import type { SourceOffer } from './source-offer.js'
@@ -27,7 +27,7 @@ const practicesOf = (shares: readonly Share[]): string[] => [
 const sumOf = (shares: readonly Share[]): ExactNumber => exactSum(shares.map(({ amount }) => amount))
 
 /**
- * Cuts a source, in this order: no eligible line, its cap, the person's limit, its exclusive group, the stack limit.
+ * Cuts a source, in this order: its cap, the person's limit, its exclusive group, the stack limit.
  */
 export function cutSource(
   source: FundingSource,
@@ -37,14 +37,13 @@ export function cutSource(
 ): CutOffer {
   const { key, cap, personLimitRemaining, exclusiveGroup } = source
   const steps: ((open: Share[]) => Step)[] = [
-    (open) => ({ shares: open, reasons: [whole('no line of this job is eligible')] }),
     (open) => downTo(open, cap, `${key}.cap`, 'source cap'),
     (open) => downTo(open, personLimitRemaining, `${key}.personLimitRemaining`, 'person limit'),
     (open) => outsideTheGroup(open, exclusiveGroup, paid),
     (open) => (rule.scope === 'practice' ? insideEachPractice(open, paid, rule) : unchanged(open)),
     (open) => insideTheJob(open, paid, rule),
   ]
-  let left: CutOffer = { paid: offered, shares, cuts: [] }
+  let left = withoutLines({ paid: offered, shares, cuts: [] })
   for (const step of steps) left = applied(left, step(left.shares))
   return left
 }
@@ -52,7 +51,18 @@ export function cutSource(
 const whole = (reason: string) => ({ reason, weight: new Exact(1) })
 const unchanged = (shares: Share[]): Step => ({ shares, reasons: [] })
 
+/** A source with no line to pay on pays nothing, and says so. */
+function withoutLines(offer: CutOffer): CutOffer {
+  if (offer.shares.length > 0 || offer.paid === noMoney) return offer
+  return {
+    ...offer,
+    paid: noMoney,
+    cuts: [{ reason: 'no line of this job is eligible', amount: offer.paid }],
+  }
+}
+
 function applied(before: CutOffer, { shares, reasons }: Step): CutOffer {
+  if (shares === before.shares) return before
   const paid = halfUpToCents(sumOf(shares))
   const cut = subtractMoney(before.paid, paid)
   const amounts = allocateMoney(
@@ -75,6 +85,7 @@ function downTo(shares: Share[], limit: string | undefined, field: string, name:
 function outsideTheGroup(shares: Share[], group: string | undefined, { byGroup }: PaidSoFar): Step {
   const payerOf = (practice: string) => byGroup.get(`${group}/${practice}`)
   const taken = practicesOf(shares).filter((practice) => payerOf(practice) !== undefined)
+  if (taken.length === 0) return unchanged(shares)
   return {
     shares: shares.filter(({ practice }) => !taken.includes(practice)),
     reasons: taken.map((practice) => ({
@@ -97,18 +108,23 @@ function insideTheJob(shares: Share[], paid: PaidSoFar, rule: StackRule): Step {
 }
 
 function insideEachPractice(shares: Share[], paid: PaidSoFar, rule: StackRule): Step {
-  const parts = practicesOf(shares).map((practice) => {
-    const mine = shares.filter((share) => share.practice === practice)
+  const over = practicesOf(shares).flatMap((practice) => {
+    const sum = sumOf(shares.filter((share) => share.practice === practice))
     const cost = exactSum(rule.lines.filter((line) => line.practice === practice).map((line) => line.cost))
-    const room = limitOf(cost, rule.limitPercent).minus(paid.byPractice.get(practice) ?? 0)
-    const held = scaledTo(mine, Exact.max(room, 0))
-    const reason = `stack limit ${rule.limitPercent} % of estimated cost, practice ${practice}`
-    return { held, reason, weight: sumOf(mine).minus(sumOf(held)) }
+    const open = limitOf(cost, rule.limitPercent).minus(paid.byPractice.get(practice) ?? 0)
+    const room = Exact.max(open, 0)
+    return sum.lessThanOrEqualTo(room) ? [] : [{ practice, room, sum }]
   })
-  const byKey = new Map(parts.flatMap(({ held }) => held).map((share) => [share.key, share]))
+  if (over.length === 0) return unchanged(shares)
   return {
-    shares: shares.map((share) => byKey.get(share.key) ?? share),
-    reasons: parts.map(({ reason, weight }) => ({ reason, weight })),
+    shares: shares.map((share) => {
+      const held = over.find(({ practice }) => practice === share.practice)
+      return held ? { ...share, amount: share.amount.times(held.room).dividedBy(held.sum) } : share
+    }),
+    reasons: over.map(({ practice, room, sum }) => ({
+      reason: `stack limit ${rule.limitPercent} % of estimated cost, practice ${practice}`,
+      weight: sum.minus(room),
+    })),
   }
 }
 
