@@ -1,15 +1,29 @@
 import { Injectable } from '@nestjs/common'
-import type { SessionView } from 'shared'
+import { Problem, type SessionView } from 'shared'
 import { In } from 'typeorm'
 import { District } from '../districts/district.entity.js'
 import type { AccountsTx } from '../platform/database/tx.js'
+import { UnitOfWork } from '../platform/database/unit-of-work.js'
 import { Membership } from './membership.entity.js'
-import type { LiveSession } from './sessions.service.js'
+import { SessionsService, type LiveSession } from './sessions.service.js'
 
 /** What the client learns of who is signed in, where, and where else they may work. */
 @Injectable()
 export class SessionViewService {
-  async viewOf(tx: AccountsTx, { session, person, roles }: LiveSession): Promise<SessionView> {
+  constructor(
+    private readonly unitOfWork: UnitOfWork,
+    private readonly sessions: SessionsService,
+  ) {}
+
+  read(sessionId: string): Promise<SessionView> {
+    return this.unitOfWork.runForAccounts(async (tx) => {
+      const live = await this.sessions.findLive(tx, sessionId)
+      if (live === null) throw new Problem('not-signed-in')
+      return this.viewOf(tx, live)
+    })
+  }
+
+  private async viewOf(tx: AccountsTx, { session, person, roles }: LiveSession): Promise<SessionView> {
     const memberships = await tx.manager.findBy(Membership, { personId: person.id, isActive: true })
     const ids = memberships.map(({ districtId }) => districtId)
     const districts = await tx.manager.findBy(District, { id: In(ids) })

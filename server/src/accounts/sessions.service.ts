@@ -75,6 +75,18 @@ export class SessionsService {
     }))
   }
 
+  /** @throws Problem not-found for a district that the person is no member of, or a session by a mailed link. */
+  async moveTo(
+    tx: AccountsTx,
+    { id, personId, districtId }: { id: string; personId: string; districtId: string },
+  ): Promise<void> {
+    const isMember = await tx.manager.existsBy(Membership, { personId, districtId, isActive: true })
+    if (!isMember) throw new Problem('not-found')
+    const own = { id, personId, jobId: IsNull(), revokedAt: IsNull() }
+    const { affected } = await tx.manager.update(Session, own, { districtId })
+    if (affected !== 1) throw new Problem('not-found')
+  }
+
   async end(tx: AccountsTx, personId: string, id: string): Promise<void> {
     const { affected } = await tx.manager.update(
       Session,

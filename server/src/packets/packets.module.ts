@@ -5,9 +5,12 @@ import { SignaturesModule } from '../signatures/signatures.module.js'
 import { SurveysModule } from '../surveys/surveys.module.js'
 import { MakePacketService } from './make-packet.service.js'
 import { PacketAccessService } from './packet-access.service.js'
+import { PacketActsController } from './packet-acts.controller.js'
 import { PacketDraftService } from './packet-draft.service.js'
+import { PacketFileService } from './packet-file.service.js'
 import { PacketRendererService } from './packet-renderer.service.js'
 import { PacketViewService } from './packet-view.service.js'
+import { PacketsController } from './packets.controller.js'
 import { PacketsService } from './packets.service.js'
 import { PageReadingService } from './page-reading.service.js'
 import { RenderPacketService } from './render-packet.service.js'
@@ -18,11 +21,13 @@ import { TechnicalCheckService } from './technical-check.service.js'
 
 @Module({
   imports: [DesignsModule, JobsModule, SignaturesModule, SurveysModule],
+  controllers: [PacketActsController, PacketsController],
   providers: [
     MakePacketService,
     PacketAccessService,
     PacketDraftService,
     PacketEvidenceService,
+    PacketFileService,
     PacketRendererService,
     PacketSourceService,
     PacketViewService,

@@ -64,8 +64,8 @@ function refuseCheck(packet: Packet, facts: JobFacts, actor: Actor): void {
       ? null
       : 'This is not the packet of the design as it stands. Open the newest revision.',
     packet.status === 'ready' ? null : 'The packet is not made yet.',
-    guards.notDesigner(facts, actor, null),
-    guards.notPayeeOrKin(facts, actor, null),
+    guards.notDesigner(facts, actor),
+    guards.notPayeeOrKin(facts, actor),
   ].filter((reason) => reason !== null)
   if (reasons.length > 0) throw new Problem('transition-not-allowed', { reasons })
 }

@@ -8,7 +8,9 @@ import { JobsModule } from '../jobs.module.js'
 import { ActNotesService } from './act-notes.service.js'
 import { ActNoticesService } from './act-notices.service.js'
 import { ActRecordersService } from './act-recorders.service.js'
+import { ActsController } from './acts.controller.js'
 import { ActsService } from './acts.service.js'
+import { JobMailController } from './job-mail.controller.js'
 import { LandownerActs } from './landowner-acts.service.js'
 import { OfficeActs } from './office-acts.service.js'
 import { RecipientsService } from './recipients.service.js'
@@ -17,6 +19,7 @@ import { SupervisorActs } from './supervisor-acts.service.js'
 /** Moves jobs. It stands on top of the other domains, and none of them knows it. */
 @Module({
   imports: [AccountsModule, JobsModule, MailModule, PacketsModule, ReviewsModule, SignaturesModule],
+  controllers: [ActsController, JobMailController],
   providers: [
     ActNotesService,
     ActNoticesService,
@@ -27,5 +30,6 @@ import { SupervisorActs } from './supervisor-acts.service.js'
     RecipientsService,
     SupervisorActs,
   ],
+  exports: [ActsService],
 })
 export class ActsModule {}

@@ -35,7 +35,9 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
     mailFrom: values.MAIL_FROM,
     runFolder: values.RUN_FOLDER,
     clientFolder: values.CLIENT_FOLDER ?? fileURLToPath(builtClient),
-    trustedProxies: values.TRUSTED_PROXIES.split(',').map((text) => text.trim()).filter((text) => text !== ''),
+    trustedProxies: values.TRUSTED_PROXIES.split(',')
+      .map((text) => text.trim())
+      .filter((text) => text !== ''),
     isDemo: values.DEMO === 'on',
     worksQueue: values.QUEUE === 'on',
     secrets: readSecrets(values.SECRETS_FILE),
@@ -43,7 +45,11 @@ export function readConfig(environment: NodeJS.ProcessEnv): Config {
 }
 
 export function readSecrets(file: string): Secrets {
-  return parse(secretsSchema, JSON.parse(readFileSync(file, 'utf8')), `The secrets in ${file} are not complete`)
+  return parse(
+    secretsSchema,
+    JSON.parse(readFileSync(file, 'utf8')),
+    `The secrets in ${file} are not complete`,
+  )
 }
 
 /** Says which value is wrong and why, and never what the value was. */

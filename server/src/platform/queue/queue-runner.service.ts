@@ -1,4 +1,9 @@
-import { Injectable, Logger, type BeforeApplicationShutdown, type OnApplicationBootstrap } from '@nestjs/common'
+import {
+  Injectable,
+  Logger,
+  type BeforeApplicationShutdown,
+  type OnApplicationBootstrap,
+} from '@nestjs/common'
 import { Logger as QueueLogger, run, runOnce, type Runner } from 'graphile-worker'
 import pg from 'pg'
 import { Config } from '../config/config.js'
@@ -24,7 +29,10 @@ export class QueueRunner implements OnApplicationBootstrap, BeforeApplicationShu
       application_name: queueConnectionName,
       max: 4,
     })
-    this.pool.on('error', () => this.log.warn('The queue lost its connection to the database'))
+    const warn = () => this.log.warn('The queue lost its connection to the database')
+    this.pool.on('error', warn)
+    // A connection that is out of the pool tells only those who listen to itself.
+    this.pool.on('connect', (client) => client.on('error', warn))
   }
 
   async onApplicationBootstrap(): Promise<void> {
