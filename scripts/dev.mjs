@@ -13,7 +13,14 @@ installNodePackages()
 needDebianPackages('postgresql')
 build()
 const dataFolder = process.env.WADESTONE_DATA
-const watching = await startWadestone({ children, dataFolder, wantedPort: 3000, watch: true })
+// The browser opens Vite's address, and its requests come from there.
+const watching = await startWadestone({
+  children,
+  dataFolder,
+  wantedPort: 3000,
+  watch: true,
+  publicOrigin: 'http://127.0.0.1:5173',
+})
 children.start('compiler', [join(root, 'node_modules/typescript/bin/tsc'), '-b', '-w', 'shared', 'server'], {
   shows: true,
 })

@@ -37,6 +37,7 @@ export async function startWadestone({
   wantedPort = 8460,
   wantedMailPort = 8461,
   watch = false,
+  publicOrigin = process.env.PUBLIC_ORIGIN,
 }) {
   const database = startDatabase(dataFolder)
   const secrets = readOrMakeSecrets(database.dataFolder)
@@ -54,7 +55,7 @@ export async function startWadestone({
     MAIL_FROM: process.env.MAIL_FROM ?? 'Wadestone <packets@wadestone.example>',
     HOST: '127.0.0.1',
     PORT: String(port),
-    PUBLIC_ORIGIN: process.env.PUBLIC_ORIGIN ?? address,
+    PUBLIC_ORIGIN: publicOrigin ?? address,
     DEMO: demo,
   }
   once('migrate.js', env)

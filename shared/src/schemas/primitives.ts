@@ -22,29 +22,22 @@ export const idSchema = z.uuid('This is not an id of Wadestone')
 
 export const sha256Schema = z.string().regex(/^[0-9a-f]{64}$/, 'A SHA-256 has 64 hexadecimal digits')
 
+/** Control characters, and the signs that make text read in another order than it is stored. */
+const hiddenSigns = /\p{Cc}|[\u202A-\u202E\u2066-\u2069]/u
+const hiddenSignsMessage = 'Control characters are not allowed'
+
+const typedText = (max: number) =>
+  z.string().trim().min(1, 'This must not be empty').max(max, `Use at most ${max} characters`)
+
 /** One line of text a person types: trimmed, no control characters, so that it prints and mails safely. */
 export const lineOfText = (max: number) =>
-  z
-    .string()
-    .trim()
-    .min(1, 'This must not be empty')
-    .max(max, `Use at most ${max} characters`)
-    .refine(
-      (text) => !/\p{Cc}|[\u202A-\u202E\u2066-\u2069]/u.test(text),
-      'Control characters are not allowed',
-    )
+  typedText(max).refine((text) => !hiddenSigns.test(text), hiddenSignsMessage)
 
 /** Several lines of text a person types. */
 export const paragraph = (max: number) =>
-  z
-    .string()
-    .trim()
-    .min(1, 'This must not be empty')
-    .max(max, `Use at most ${max} characters`)
-    .refine(
-      (text) => !/[\u0000-\u0008\u000B-\u001F\u007F\u202A-\u202E\u2066-\u2069]/.test(text),
-      'Control characters are not allowed',
-    )
+  typedText(max)
+    .overwrite((text) => text.replaceAll('\r\n', '\n'))
+    .refine((text) => !hiddenSigns.test(text.replace(/[\t\n]/g, '')), hiddenSignsMessage)
 
 export const emailSchema = z
   .email('Give one e-mail address, such as name@example.org')

@@ -23,7 +23,7 @@ const filled = (text: string | undefined): boolean => (text ?? '').trim().length
 export const guards = {
   packetRendered: (f) =>
     unless(
-      f.packetA?.sha256 != null,
+      (f.packetA?.sha256 ?? null) !== null,
       'The packet of this very design is not made yet. Make the packet first.',
     ),
   technicallyChecked: (f) =>
@@ -86,7 +86,10 @@ export const guards = {
     ),
   budgetLeft: (f) => unless(f.budgetLeft, 'The fund has no money left for this job.'),
   finalPacketReady: (f) =>
-    unless(f.packetB?.sha256 != null, 'The approved packet is still being made. Try again in a moment.'),
+    unless(
+      (f.packetB?.sha256 ?? null) !== null,
+      'The approved packet is still being made. Try again in a moment.',
+    ),
   addressConfirmed: (_f, _a, r) =>
     given(r, (q) => q.addressConfirmed === true, 'Confirm the address the packet goes to.'),
   permitsRecorded: (f) => unless(f.permitsRecorded, 'The permits are not recorded yet.'),
