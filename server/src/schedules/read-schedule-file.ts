@@ -1,9 +1,7 @@
-import { EngineeringInputError, Problem, readScheduleLinesCsv } from 'shared'
-
-type ScheduleLinesCsv = ReturnType<typeof readScheduleLinesCsv>
+import { EngineeringInputError, Problem, readScheduleLinesCsv, type ScheduleCsv } from 'shared'
 
 /** Lines of a schedule from an uploaded file, whichever of the two usual encodings the spreadsheet wrote. */
-export function readScheduleFile(bytes: Uint8Array): ScheduleLinesCsv {
+export function readScheduleFile(bytes: Uint8Array): ScheduleCsv {
   try {
     return readScheduleLinesCsv({ text: decoded(bytes) })
   } catch (error) {

@@ -2,6 +2,7 @@ import { Body, Controller, Get, HttpCode, Param, Post, Put } from '@nestjs/commo
 import {
   mapScheduleLinesSchema,
   scheduleInputSchema,
+  type ScheduleCsv,
   type ScheduleInput,
   type ScheduleLine,
   type ScheduleListItem,
@@ -50,7 +51,7 @@ export class SchedulesController {
   @HttpCode(200)
   @Upload()
   @Requires('schedule:write')
-  readCsv(@UploadedBytes() bytes: Buffer): ReturnType<typeof readScheduleFile> {
+  readCsv(@UploadedBytes() bytes: Buffer): ScheduleCsv {
     return readScheduleFile(bytes)
   }
 

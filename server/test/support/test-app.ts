@@ -60,7 +60,8 @@ export async function startTestApp(): Promise<TestApp> {
     .compile()
   const nest = module.createNestApplication<NestExpressApplication>({ bodyParser: false, logger: false })
   configureWeb(nest, config)
-  await nest.init()
+  // Listening all along: supertest would open and close a port around each request, and two at once would meet.
+  await nest.listen(0, '127.0.0.1')
   return {
     nest,
     database,
