@@ -1,5 +1,6 @@
 import { Injectable } from '@nestjs/common'
 import { Problem, type ScheduleListItem, type ScheduleView } from 'shared'
+import { In, LessThanOrEqual, MoreThanOrEqual } from 'typeorm'
 import type { Tx } from '../platform/database/tx.js'
 import { PaymentSchedule } from './payment-schedule.entity.js'
 import { ScheduleLineRow } from './schedule-line.entity.js'
@@ -34,6 +35,21 @@ export class ScheduleViewsService {
 
   async viewOf(tx: Tx, schedule: PaymentSchedule): Promise<ScheduleView> {
     return scheduleView(schedule, await this.linesOf(tx, schedule.id))
+  }
+
+  /** Those of the keys that are in force and run on a day. */
+  async inForceOn(tx: Tx, keys: readonly string[], onDate: string): Promise<ScheduleView[]> {
+    if (keys.length === 0) return []
+    const schedules = await tx.manager.findBy(PaymentSchedule, {
+      districtId: tx.districtId,
+      key: In([...keys]),
+      status: 'in-force',
+      effectiveFrom: LessThanOrEqual(onDate),
+      effectiveTo: MoreThanOrEqual(onDate),
+    })
+    const views: ScheduleView[] = []
+    for (const schedule of schedules) views.push(await this.viewOf(tx, schedule))
+    return views
   }
 
   /** In their printed order. */

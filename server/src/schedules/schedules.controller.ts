@@ -1,5 +1,6 @@
 import { Body, Controller, Get, HttpCode, Param, Post, Put } from '@nestjs/common'
 import {
+  readScheduleLinesCsv,
   mapScheduleLinesSchema,
   scheduleInputSchema,
   type ScheduleCsv,
@@ -17,8 +18,8 @@ import { Intended, type Intention } from '../platform/idempotency/intended.decor
 import { OnceService } from '../platform/idempotency/once.service.js'
 import { idParam } from '../platform/web/id-param.js'
 import { parsedBy } from '../platform/web/parsed-by.js'
+import { readTextFile } from '../platform/web/read-text-file.js'
 import { SeenVersion } from '../platform/web/seen-version.decorator.js'
-import { readScheduleFile } from './read-schedule-file.js'
 import { ScheduleViewsService } from './schedule-views.service.js'
 import { SchedulesService } from './schedules.service.js'
 
@@ -52,7 +53,7 @@ export class SchedulesController {
   @Upload()
   @Requires('schedule:write')
   readCsv(@UploadedBytes() bytes: Buffer): ScheduleCsv {
-    return readScheduleFile(bytes)
+    return readTextFile(bytes, (text) => readScheduleLinesCsv({ text }))
   }
 
   @Get(':id')

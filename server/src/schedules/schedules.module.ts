@@ -8,6 +8,6 @@ import { SchedulesService } from './schedules.service.js'
   imports: [DistrictsModule],
   controllers: [SchedulesController],
   providers: [ScheduleViewsService, SchedulesService],
-  exports: [SchedulesService],
+  exports: [ScheduleViewsService, SchedulesService],
 })
 export class SchedulesModule {}

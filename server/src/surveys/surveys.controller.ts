@@ -1,5 +1,11 @@
 import { Body, Controller, Get, HttpCode, Param, Post, Put } from '@nestjs/common'
-import { surveyInputSchema, type LevelNotesCsv, type SurveyInput, type SurveyView } from 'shared'
+import {
+  readLevelNotesCsv,
+  surveyInputSchema,
+  type LevelNotesCsv,
+  type SurveyInput,
+  type SurveyView,
+} from 'shared'
 import type { Caller } from '../platform/auth/caller.js'
 import { Requires } from '../platform/auth/requires.decorator.js'
 import { Upload, UploadedBytes } from '../platform/auth/upload.decorator.js'
@@ -7,8 +13,8 @@ import { WhoCalls } from '../platform/auth/who-calls.decorator.js'
 import { UnitOfWork } from '../platform/database/unit-of-work.js'
 import { idParam } from '../platform/web/id-param.js'
 import { parsedBy } from '../platform/web/parsed-by.js'
+import { readTextFile } from '../platform/web/read-text-file.js'
 import { SeenVersion } from '../platform/web/seen-version.decorator.js'
-import { readNotesFile } from './read-notes-file.js'
 import { SurveysService } from './surveys.service.js'
 
 @Controller()
@@ -43,6 +49,6 @@ export class SurveysController {
   @Requires('survey:write')
   @Upload()
   readCsv(@UploadedBytes() bytes: Buffer): LevelNotesCsv {
-    return readNotesFile(bytes)
+    return readTextFile(bytes, (text) => readLevelNotesCsv({ text }))
   }
 }

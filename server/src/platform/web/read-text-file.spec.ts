@@ -1,5 +1,7 @@
-import { Problem } from 'shared'
-import { readScheduleFile } from './read-schedule-file'
+import { Problem, readScheduleLinesCsv } from 'shared'
+import { readTextFile } from './read-text-file'
+
+const readSchedule = (bytes: Uint8Array) => readTextFile(bytes, (text) => readScheduleLinesCsv({ text }))
 
 const columns = 'code,practice,title,unit,base_rate'
 const inWindows = (text: string): Buffer => Buffer.from(text, 'latin1')
@@ -10,11 +12,11 @@ describe('an uploaded schedule', () => {
     ['UTF-8 with a mark', Buffer.from(`\uFEFF${columns}\nA1,561,d½,ton,24.00`), 'd½'],
     ['Windows', inWindows(`${columns}\nA1,561,Stone d\xBD,ton,24.00`), 'Stone d½'],
   ])('is read in %s', (_, bytes, title) => {
-    expect(readScheduleFile(bytes)).toMatchObject({ lines: [{ code: 'A1', title }], errors: [] })
+    expect(readSchedule(bytes)).toMatchObject({ lines: [{ code: 'A1', title }], errors: [] })
   })
 
   it('names the faults of a line and gives the good lines', () => {
-    const { lines, errors } = readScheduleFile(
+    const { lines, errors } = readSchedule(
       Buffer.from(`${columns}\nA1,561,Stone,ton,24.00\nA2,56,Sand,ton,1`),
     )
     expect(lines.map(({ code }) => code)).toEqual(['A1'])
@@ -22,7 +24,7 @@ describe('an uploaded schedule', () => {
   })
 
   it('that is no table at all is refused as a file', () => {
-    const read = () => readScheduleFile(Buffer.from([0x25, 0x50, 0x44, 0x46, 0x00]))
+    const read = () => readSchedule(Buffer.from([0x25, 0x50, 0x44, 0x46, 0x00]))
     expect(read).toThrow(Problem)
     expect(read).toThrow(expect.objectContaining({ slug: 'unreadable-file' }))
   })

@@ -1,9 +1,9 @@
-import { EngineeringInputError, Problem, readScheduleLinesCsv, type ScheduleCsv } from 'shared'
+import { EngineeringInputError, Problem } from 'shared'
 
-/** Lines of a schedule from an uploaded file, whichever of the two usual encodings the spreadsheet wrote. */
-export function readScheduleFile(bytes: Uint8Array): ScheduleCsv {
+/** Hands an uploaded file to its reader as text, whichever of the two usual encodings the spreadsheet wrote. */
+export function readTextFile<Content>(bytes: Uint8Array, read: (text: string) => Content): Content {
   try {
-    return readScheduleLinesCsv({ text: decoded(bytes) })
+    return read(decoded(bytes))
   } catch (error) {
     if (!(error instanceof EngineeringInputError)) throw error
     throw new Problem('unreadable-file', {
