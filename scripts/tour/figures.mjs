@@ -6,8 +6,8 @@ export function figuresOf({ working, quantities, cost, funding }) {
   for (const { part, key, result, unit } of working) figures[`${part}.${key}`] = { value: result, unit }
   for (const { key, quantity, unit } of quantities.value)
     figures[`quantities.${key}`] = { value: quantity, unit }
-  for (const { key, amount } of cost.value.lines) figures[`cost.${key}`] = money(amount)
-  figures['cost.total'] = money(cost.value.total)
+  for (const { key, typical } of cost.value.lines) figures[`cost.${key}`] = money(typical)
+  for (const bound of ['low', 'typical', 'high']) figures[`cost.${bound}`] = money(cost.value[bound])
   for (const { key, offered, paid } of funding.value.sources) {
     figures[`funding.${key}.offered`] = money(offered)
     figures[`funding.${key}.paid`] = money(paid)

@@ -65,7 +65,7 @@ function tellDesign({ result }, record) {
     'designs ramp, rock, fabric, fence and berm',
     `${rock.value.totalOrderTons.toFixed(2)} tons of stone`,
   )
-  record.step('planner', 'prices it', `$${cost.value.total}`)
+  record.step('planner', 'prices it', `$${cost.value.typical}`)
   const paid = funding.value.sources.map(({ key, paid: amount }) => `${key} $${amount}`).join(', ')
   record.step('planner', 'works out the cost-share', `${paid}; landowner $${funding.value.landownerShare}`)
 }

@@ -1,27 +1,13 @@
-import { readFileSync } from 'node:fs'
-import { computeDesign } from '../src/engineering/design/compute-design.js'
-import { designInput } from '../src/engineering/design/design-input.js'
-import { groundLineFromNotes } from '../src/engineering/survey/ground-line-from-notes.js'
-import { parseLevelNotesCsv } from '../src/engineering/survey/parse-level-notes-csv.js'
-import { reduceLevelNotes } from '../src/engineering/survey/reduce-level-notes.js'
-import { sourceFromSchedule } from '../src/money/funding/source-from-schedule.js'
 import type { Criterion } from '../src/schemas/criteria.js'
 import type { DesignPlan } from '../src/schemas/design-plan.js'
-import { exampleJobSchema } from '../src/schemas/example-job.js'
+import { exampleDesign, readExample } from './example-design.js'
 
-const beside = (file: string) => readFileSync(new URL(`./${file}`, import.meta.url), 'utf8')
+const read = readExample('north-pond')
 
-export const northPond = exampleJobSchema.parse(JSON.parse(beside('north-pond.json')))
-
-const { startElevationFt, closing, waterSurfaceFt, notesFile } = northPond.survey
-export const northPondRows = parseLevelNotesCsv({ text: beside(notesFile) })
-export const northPondNotes = reduceLevelNotes({
-  startElevationFt,
-  waterSurfaceFt,
-  rows: northPondRows,
-  ...(closing ? { closing } : {}),
-})
-export const northPondGround = groundLineFromNotes({ points: northPondNotes.points })
+export const northPond = read.example
+export const northPondRows = read.rows
+export const northPondNotes = read.notes
+export const northPondGround = read.groundLine
 
 const criterion = (
   id: string,
@@ -55,14 +41,6 @@ export const northPondCriteria: Criterion[] = [
 /** The whole job worked out with its own prices and funds; `change` alters the plan first. */
 export function northPondDesign(change: (plan: DesignPlan) => DesignPlan = (plan) => plan) {
   const plan = change(structuredClone(northPond.plan))
-  const sources = (plan.funding?.sources ?? []).flatMap((choice) => {
-    const schedule = northPond.schedules.find(({ key }) => key === choice.scheduleKey)
-    return schedule ? [sourceFromSchedule({ schedule, choice })] : []
-  })
-  const { costList, settings } = northPond
-  const criteria = northPondCriteria
-  const result = computeDesign(
-    designInput({ plan, groundLine: northPondGround, costList, sources, criteria, settings }),
-  )
+  const result = exampleDesign({ ...read, plan, criteria: northPondCriteria })
   return { plan, result, groundLine: northPondGround }
 }

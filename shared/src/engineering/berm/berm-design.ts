@@ -4,6 +4,7 @@ import { bermChannel } from './berm-channel.js'
 import type { BermDesignInput, BermDesignResult } from './berm-design-types.js'
 import { bermEarth } from './berm-earth.js'
 import { bermHydraulics } from './berm-hydraulics.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 /**
  * Berm above the ramp: depth of its channel, height, section, length, earth and ends.
@@ -39,7 +40,7 @@ export function bermDesign(input: BermDesignInput): BermDesignResult {
     heightGovernedBy: wanted >= minimum ? 'depth and freeboard' : 'minimum height',
     ...ridge,
     downslopeFootFromCentreFt: input.topWidthFt / 2 + downslopeReach,
-    earthYd3PerFt: ridge.areaFt2 / 27,
+    earthYd3PerFt: ridge.areaFt2 / FT3_PER_YD3,
     lengthFt,
     ...earth,
     channelFallFt,

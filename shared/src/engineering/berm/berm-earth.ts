@@ -3,6 +3,7 @@ import { requireNumber } from '../require-number.js'
 import type { BermDesignInput } from './berm-design-types.js'
 import { ridgeSection, type RidgeSectionResult } from './ridge-section.js'
 import { sectionGeometry } from './section-geometry.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface BermEarth {
   ridge: RidgeSectionResult
@@ -19,7 +20,6 @@ interface BermEarthInput {
   lengthFt: number
 }
 
-const FT3_PER_YD3 = 27
 const CROSSING_RUN_PER_RISE = 8
 
 /**

@@ -56,6 +56,19 @@ describe('entersOutline', () => {
     expect(entersOutline({ points: at(pairs), outline: square })).toBe(expected)
   })
 
+  it.each([
+    ['south', [50, -10], [50, 0], [50, 1]],
+    ['north', [50, 110], [50, 100], [50, 99]],
+    ['west', [-10, 50], [0, 50], [1, 50]],
+    ['east', [110, 50], [100, 50], [99, 50]],
+  ] as const)(
+    'lets a run from the %s end at the edge of the water, and not a foot past it',
+    (_, land, edge, wet) => {
+      expect(entersOutline({ points: at([land, edge]), outline: square })).toBe(false)
+      expect(entersOutline({ points: at([land, wet]), outline: square })).toBe(true)
+    },
+  )
+
   it('minds the bay of an outline that is not convex', () => {
     const bay = at([
       [0, 0],

@@ -3,7 +3,7 @@ interface Place {
   northFt: number
 }
 
-/** Whether a polyline has a point inside a closed outline or crosses it. */
+/** Whether a polyline has a point inside a closed outline or crosses it. A run that ends at the outline stays out. */
 export function entersOutline({
   points,
   outline,
@@ -12,7 +12,7 @@ export function entersOutline({
   outline: readonly Place[]
 }): boolean {
   const edges = outline.map((from, index) => ({ from, to: outline[(index + 1) % outline.length] ?? from }))
-  if (points.some((point) => isInside(point, edges))) return true
+  if (points.some((point) => !isOnEdge(point, edges) && isInside(point, edges))) return true
   return points.slice(1).some((to, index) => {
     const from = points[index]
     return from !== undefined && edges.some((edge) => cross({ from, to }, edge))
@@ -22,6 +22,15 @@ export function entersOutline({
 interface Leg {
   from: Place
   to: Place
+}
+
+const ON_EDGE_FT = 1e-6
+
+function isOnEdge(point: Place, edges: readonly Leg[]): boolean {
+  const apartFt = (a: Place, b: Place) => Math.hypot(a.eastFt - b.eastFt, a.northFt - b.northFt)
+  return edges.some(({ from, to }) => {
+    return apartFt(from, point) + apartFt(point, to) - apartFt(from, to) < ON_EDGE_FT
+  })
 }
 
 /** Counts the edges that a ray to the east meets: an odd number means inside. */

@@ -2,6 +2,7 @@ import type { FencePlan } from '../../schemas/fence-plan.js'
 import { entersOutline } from './enters-outline.js'
 import { openFenceEnds } from './open-fence-ends.js'
 import { unknown, type MeasureTable } from './measure.js'
+import { FT2_PER_ACRE } from '../unit-factors.js'
 
 /** Figures of fence and closing panel. */
 export const fenceMeasures: MeasureTable = {
@@ -54,7 +55,7 @@ export const fenceMeasures: MeasureTable = {
     if (!fence) return undefined
     return fence.habitatAreaFt2 === undefined
       ? unknown('fence or water is entered without coordinates')
-      : { actual: fence.habitatAreaFt2 / 43_560 }
+      : { actual: fence.habitatAreaFt2 / FT2_PER_ACRE }
   },
 }
 

@@ -1,6 +1,5 @@
 import { unknown, type MeasureTable } from './measure.js'
-
-const FT2_PER_ACRE = 43_560
+import { FT2_PER_ACRE } from '../unit-factors.js'
 
 /** Figures of earthwork, rock and fabric. */
 export const surfaceMeasures: MeasureTable = {

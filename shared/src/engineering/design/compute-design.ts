@@ -12,6 +12,7 @@ import { fieldPath } from './field-path.js'
 import { NotReady } from './not-ready.js'
 import type { PartResult } from './part-result.js'
 import { recipes } from './recipes/recipes.js'
+import { soundPlan, type SoundPlan } from './sound-plan.js'
 import { workingFigures } from './working/working-figures.js'
 
 /**
@@ -23,8 +24,9 @@ import { workingFigures } from './working/working-figures.js'
  * @example computeDesign(designInput({ plan, groundLine, costList, sources, criteria, settings })).cost
  */
 export function computeDesign(input: DesignInput): DesignResult {
-  const parts = partResults(input)
-  const ask = askOf(input, parts)
+  const plan = soundPlan(input)
+  const parts = partResults(plan)
+  const ask = askOf(plan, parts)
   const quantities = attempt(
     () => quantitiesOf(ask, parts),
     (field) => `quantities.${field}`,
@@ -42,16 +44,16 @@ export function computeDesign(input: DesignInput): DesignResult {
     quantities,
     cost,
     funding,
-    checks: checkDesign({ design: input, result: parts, criteria: input.criteria }),
+    checks: checkDesign({ design: plan.sound, result: parts, criteria: input.criteria }),
     working: workingFigures(ask),
     calculationVersion: CALCULATION_VERSION,
   }
 }
 
 /** A recipe sees what is done before it, so the order is that of need. */
-function partResults(input: DesignInput): DesignPartResults {
+function partResults(plan: SoundPlan): DesignPartResults {
   const done: Partial<DesignPartResults> = {}
-  for (const part of inOrderOfNeed) workOut(part, input, done)
+  for (const part of inOrderOfNeed) workOut(part, plan, done)
   return done as DesignPartResults
 }
 
@@ -65,11 +67,11 @@ const inOrderOfNeed: readonly DesignPartName[] = [
 
 function workOut<Part extends DesignPartName>(
   part: Part,
-  input: DesignInput,
+  plan: SoundPlan,
   done: Partial<DesignPartResults>,
 ): void {
   const result: PartResult<PartValues[Part]> = attempt(
-    () => recipes[part](askOf(input, done)),
+    () => recipes[part](askOf(plan, done)),
     (field) => fieldPath(part, field),
   )
   done[part] = result as DesignPartResults[Part]

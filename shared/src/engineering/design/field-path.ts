@@ -42,10 +42,12 @@ const enteredElsewhere: { readonly [field: string]: string } = {
   wetLengthFt: 'site.waterSurfaceTodayFt',
 }
 
-/** Inputs of earthwork, rock and panel that belong to the ramp or the rock. */
+/** The same where the name alone does not say it: inputs that belong to another part than the formula. */
 const enteredElsewhereByPart: { readonly [part: string]: { readonly [field: string]: string } } = {
   earthwork: { widthFt: 'ramp.widthFt', edgeRunPerRise: 'rock.edgeRunPerRise' },
   rock: { widthFt: 'ramp.widthFt' },
+  pond: { dailyWaterGal: 'herd.classes' },
+  seeding: { disturbedAreaFt2: 'seeding.extraDisturbedAreaFt2' },
   closingPanel: { widthFt: 'ramp.widthFt' },
 }
 

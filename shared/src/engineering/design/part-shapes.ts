@@ -2,8 +2,11 @@ import type { BermDesignResult } from '../berm/berm-design-types.js'
 import type { FabricLayout } from '../fabric/fabric-layout.js'
 import type { FabricTakeOff } from '../fabric/fabric-take-off.js'
 import type { FenceRunResult, FenceTakeOffResult } from '../fence/fence-result.js'
+import type { SupplyStep } from '../pond/days-of-supply.js'
+import type { PondStorage } from '../pond/pond-storage.js'
 import type { RockLayer, RockLayers } from '../rock/rock-layers.js'
 import type { DesignPeakResult } from '../runoff/design-peak-types.js'
+import type { SeedingPlan } from '../seeding/seeding-plan.js'
 import type { ProfileValue, EarthworkValue } from './ramp-shapes.js'
 
 export type { ProfileValue, EarthworkValue }
@@ -72,14 +75,19 @@ export interface RunoffValue {
 export type BermValue = BermDesignResult
 
 export interface PondValue {
-  storage: { averageEndAreaFt3: number[]; prismoidalFt3: number[] }
+  storage: PondStorage
+  /** From full pool down to the level at which the ramp still gives the drinking depth. */
+  fromElevationFt: number
+  toElevationFt: number
+  usableFt3: number
   usePerDayFt3: number
   daysOfSupply: number
+  /** From the water as it stood on the day of the survey, down to the same level. */
+  daysFromToday: number
+  steps: SupplyStep[]
 }
 
-export interface SeedingValue {
-  disturbedAreaFt2: number
-  acres: number
-  mix: { species: string; plsLb: number; bulkLb: number }[]
-  mulchTons: number
+export interface SeedingValue extends SeedingPlan {
+  /** Cut and fill sides above the water; the rest is the berm and what the planner added. */
+  sideSlopesFt2: number
 }

@@ -2,6 +2,7 @@ import { fabricTakeOff, type FabricTakeOff } from '../fabric/fabric-take-off.js'
 import { requireNumber } from '../require-number.js'
 import { requireStoneRates } from '../rock/require-stone-rates.js'
 import { stoneQuantity, type StoneQuantity } from '../rock/stone-quantity.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface PadFabric {
   sideTurnUpFt: number
@@ -39,7 +40,6 @@ export interface ApproachPad extends StoneQuantity {
 }
 
 const DEFAULT_THICKEN_FT = 3
-const FT3_PER_YD3 = 27
 
 /**
  * Rocked pad from the ramp's top station landward; the ramp owns the station itself. Area = length · width; rock =

@@ -1,13 +1,12 @@
 import { EngineeringInputError } from '../engineering-input-error.js'
 import { requireNumber } from '../require-number.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface EndAreaSection {
   stationFt: number
   cutAreaFt2: number
   fillAreaFt2: number
 }
-
-const FT3_PER_YD3 = 27
 
 /**
  * Volumes by average end area: V = L(A1 + A2)/2. Where one section is pure cut and the next pure fill, the zero point

@@ -1,6 +1,7 @@
 import type { EarthVolumes } from '../design/ramp-shapes.js'
 import { requireNumber } from '../require-number.js'
 import type { Stripping } from './stripping.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface BalanceSettings {
   swellPercent?: number
@@ -27,8 +28,6 @@ export interface EarthBalance {
   spoilLooseYd3: number
   spoilSpreadAreaFt2?: number
 }
-
-const FT3_PER_YD3 = 27
 
 interface BalanceInput extends BalanceSettings {
   volumes: EarthVolumes

@@ -4,6 +4,7 @@ import type { GroundPoint } from '../survey/resolve-ground-line.js'
 import { sectionAreas, type SectionAreas, type SectionTemplate } from './section-areas.js'
 import { finishedAt } from './finished-at.js'
 import type { Stretch } from './stretches.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface MeasureInput {
   stretch: Stretch
@@ -18,8 +19,6 @@ export interface MeasuredStretch {
   averageEndArea: EarthVolumes
   prismoidal: EarthVolumes
 }
-
-const FT3_PER_YD3 = 27
 
 /** Sections of one stretch, and its volumes both ways. */
 export function measureStretch(input: MeasureInput): MeasuredStretch {

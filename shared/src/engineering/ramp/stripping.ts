@@ -1,5 +1,6 @@
 import type { EarthSection } from '../design/ramp-shapes.js'
 import type { SectionTemplate } from './section-areas.js'
+import { FT3_PER_YD3 } from '../unit-factors.js'
 
 export interface Stripping {
   /** Topsoil taken off and stockpiled for seeding, yd³. */
@@ -15,8 +16,6 @@ interface StrippingInput {
   stripDepthFt: number
   template: SectionTemplate
 }
-
-const FT3_PER_YD3 = 27
 
 /** Strip depth over the footprint of cut and fill wherever the ground stands out of the water. */
 export function stripping({ sections, stripDepthFt, template }: StrippingInput): Stripping {

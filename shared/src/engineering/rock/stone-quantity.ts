@@ -1,3 +1,5 @@
+import { FT3_PER_YD3 } from '../unit-factors.js'
+
 export interface StoneRates {
   unitWeightTonsPerYd3: number
   wastePercent: number
@@ -13,8 +15,6 @@ export interface StoneQuantity {
   orderTons: number
   loads?: number
 }
-
-const FT3_PER_YD3 = 27
 
 /** Tons, order tons and truck loads of a placed volume. Stones of two kinds do not share a truck. */
 export function stoneQuantity({ volumeFt3, rates }: { volumeFt3: number; rates: StoneRates }): StoneQuantity {

@@ -4,6 +4,7 @@ import { EngineeringInputError } from '../engineering-input-error.js'
 import { requireNumber } from '../require-number.js'
 import { findSelfCrossing } from './find-self-crossing.js'
 import type { PlanPoint } from './signed-area.js'
+import { FT2_PER_ACRE } from '../unit-factors.js'
 
 export interface TrackPosition {
   lat: number
@@ -18,7 +19,6 @@ export interface TrackOutline {
 }
 
 const METRES_PER_FOOT = 0.3048
-const FT2_PER_ACRE = 43560
 const { WGS84 } = geodesic.Geodesic
 
 /**

@@ -1,6 +1,6 @@
-import Papa from 'papaparse'
+import { csvTable } from '../../csv/csv-table.js'
+import { refuseCsv } from '../../csv/refuse-csv.js'
 import { parseStation } from '../../format/parse-station.js'
-import { EngineeringInputError } from '../engineering-input-error.js'
 import { type LevelNotesColumn, levelNotesColumns } from './level-notes-columns.js'
 import type { LevelRow } from './reduce-level-notes.js'
 
@@ -56,13 +56,9 @@ export interface LevelNotesCsv {
  * named in `errors`. Throws only when the file as a whole is no table of level notes.
  */
 export function readLevelNotesCsv({ text }: { text: string }): LevelNotesCsv {
-  const [header, ...lines] = cells(text)
-  if (header === undefined) return refuse(['The file is empty.'])
-  const columns = levelNotesColumns(header.values)
-  if (lines.length === 0) return refuse(['The file has column names but no rows under them.'])
   const errors: LevelNotesCsvError[] = []
-  const rows = lines.map(({ values, fileRow }): LevelRow => {
-    const at = (column: LevelNotesColumn): string => values[columns.get(column) ?? -1]?.trim() ?? ''
+  const lines = csvTable({ text, content: 'level notes', columnsOf: levelNotesColumns })
+  const rows = lines.map(({ at, fileRow }): LevelRow => {
     const row: LevelRow = { label: at('label') || at('station') || `row ${fileRow}` }
     for (const { column, key, read, example } of FIGURES) {
       const written = at(column)
@@ -78,32 +74,8 @@ export function readLevelNotesCsv({ text }: { text: string }): LevelNotesCsv {
   return { rows, errors }
 }
 
-interface Line {
-  values: string[]
-  fileRow: number
-}
-
-function cells(text: string): Line[] {
-  if (typeof text !== 'string' || text.includes('\0')) {
-    return refuse(['This is not a text file. Save the level notes as CSV and choose that file.'])
-  }
-  const { data, errors } = Papa.parse<string[]>(text.replace(/^\uFEFF/, ''), { delimiter: delimiterOf(text) })
-  const quoting = errors.find(({ type }) => type === 'Quotes')
-  if (quoting) return refuse([`Row ${(quoting.row ?? 0) + 1} has a quotation mark that is not closed.`])
-  return data
-    .map((values, index) => ({ values, fileRow: index + 1 }))
-    .filter(({ values }) => values.some((value) => value.trim() !== ''))
-}
-
-/** The header decides; guessing over the whole file is led astray by commas in remarks. */
-function delimiterOf(text: string): string {
-  const header = text.trimStart().split(/\r\n|\r|\n/, 1)[0] ?? ''
-  return [';', '\t'].find((mark) => header.includes(mark)) ?? ','
-}
-
 function refuse(sentences: string[]): never {
   const shown = sentences.slice(0, MOST_SENTENCES)
   const left = sentences.length - shown.length
-  const more = left > 0 ? [`And ${left} more.`] : []
-  throw new EngineeringInputError({ field: 'text', message: [...shown, ...more].join(' ') })
+  return refuseCsv([...shown, ...(left > 0 ? [`And ${left} more.`] : [])].join(' '))
 }

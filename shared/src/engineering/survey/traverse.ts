@@ -3,6 +3,7 @@ import { requireNumber } from '../require-number.js'
 import { findSelfCrossing } from './find-self-crossing.js'
 import { legAzimuthDeg } from './leg-azimuth-deg.js'
 import { type PlanPoint, signedAreaFt2 } from './signed-area.js'
+import { FT2_PER_ACRE } from '../unit-factors.js'
 
 export interface TraverseLeg {
   azimuthDeg?: number
@@ -29,7 +30,6 @@ export interface Traverse {
   declinationDeg: number
 }
 
-const FT2_PER_ACRE = 43560
 /** Sines of round angles leave this much behind on legs of any farm's length. */
 const EXACT_FT = 1e-6
 

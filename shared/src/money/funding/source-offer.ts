@@ -39,13 +39,19 @@ function unitRateOffer(source: FundingSource, eligible: readonly FundableLine[])
   const shares = (source.lines ?? []).flatMap(({ key, contractedQuantity, rate }) => {
     const line = eligible.find((candidate) => candidate.key === key)
     if (!line) return []
-    const quantityUsed = Math.min(line.quantity, contractedQuantity ?? Infinity)
+    const quantityUsed = Math.min(line.quantity, contracted(source, key, contractedQuantity))
     const value = new Exact(quantityUsed).times(
       requireDecimal({ field: `${source.key}.${key}.rate`, value: rate }),
     )
     return [{ key, practice: line.practice, quantityUsed, rate, amount: new Exact(halfUpToCents(value)) }]
   })
   return { offered: halfUpToCents(exactSum(shares.map(({ amount }) => amount))), shares }
+}
+
+/** Nothing contracted: the whole quantity counts. */
+function contracted({ key }: FundingSource, line: string, quantity: number | undefined): number {
+  if (quantity === undefined) return Infinity
+  return requireNumber({ field: `${key}.${line}.contractedQuantity`, value: quantity, min: 0 })
 }
 
 function percentOffer(

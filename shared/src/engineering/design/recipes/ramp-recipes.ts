@@ -34,7 +34,7 @@ export const earthworkRecipe: Recipe<'earthwork'> = (ask) => {
 }
 
 export const closingPanelRecipe: Recipe<'closingPanel'> = (ask) => {
-  const panel = ask.input.closingPanel
+  const panel = ask.planIfAny('closingPanel')
   if (panel === undefined) return null
   const { groundLine, waterSurfaceTodayFt } = surveyedSite(ask)
   return closingPanel({

@@ -2,8 +2,7 @@ import { fabricTakeOff } from '../../fabric/fabric-take-off.js'
 import { approachPad } from '../../pads/approach-pad.js'
 import { rockLayers } from '../../rock/rock-layers.js'
 import type { Recipe } from './recipe.js'
-
-const FT3_PER_YD3 = 27
+import { FT3_PER_YD3 } from '../../unit-factors.js'
 
 export const rockRecipe: Recipe<'rock'> = (ask) => {
   const { layers, edgeRunPerRise } = ask.plan('rock')
@@ -28,7 +27,7 @@ export const fabricRecipe: Recipe<'fabric'> = (ask) => {
 }
 
 export const approachPadRecipe: Recipe<'approachPad'> = (ask) => {
-  const plan = ask.input.pads?.approach
+  const plan = ask.planIfAny('pads')?.approach
   if (plan === undefined) return null
   const profile = ask.part('profile')
   const landingLengthFt = ask.plan('ramp').landingLengthFt ?? 0

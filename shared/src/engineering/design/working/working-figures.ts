@@ -5,6 +5,7 @@ import { earthworkWorking } from './earthwork-working.js'
 import type { PartWorking } from './figure.js'
 import { fenceWorking } from './fence-working.js'
 import { herdWorking } from './herd-working.js'
+import { pondWorking, seedingWorking } from './land-working.js'
 import { profileWorking } from './profile-working.js'
 import { runoffWorking } from './runoff-working.js'
 import { fabricWorking, padWorking, rockWorking } from './surface-working.js'
@@ -19,6 +20,8 @@ const inOrder: readonly PartWorking[] = [
   fenceWorking,
   runoffWorking,
   bermWorking,
+  pondWorking,
+  seedingWorking,
 ]
 
 /** How each figure of the ready parts was found, in the order in which the parts are shown. */
