@@ -1,0 +1,35 @@
+import TableCell from '@mui/material/TableCell'
+import TableRow from '@mui/material/TableRow'
+import { quantityCatalogue, unitText, type QuantityKey } from 'shared'
+import { RateField } from '../../components/fields/rate-field'
+
+const prices = [
+  { name: 'low', label: 'Low' },
+  { name: 'typical', label: 'Typical' },
+  { name: 'high', label: 'High' },
+] as const
+
+interface PriceRowProps {
+  quantity: QuantityKey
+  index: number
+}
+
+export function PriceRow({ quantity, index }: PriceRowProps) {
+  const { description, unit } = quantityCatalogue[quantity]
+  return (
+    <TableRow>
+      <TableCell component="th" scope="row">
+        {description}
+      </TableCell>
+      {prices.map(({ name, label }) => (
+        <TableCell key={name}>
+          <RateField
+            name={`lines.${index}.${name}`}
+            label={`${label}, ${description.toLowerCase()}`}
+            unit={unit === 'each' ? '$ each' : `$ a ${unitText(unit, 1)}`}
+          />
+        </TableCell>
+      ))}
+    </TableRow>
+  )
+}

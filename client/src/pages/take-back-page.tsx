@@ -1,0 +1,5 @@
+import { ReasonPage } from '../features/landowner/reason-page'
+
+export function TakeBackPage() {
+  return <ReasonPage words="takeBack" />
+}
