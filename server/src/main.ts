@@ -13,7 +13,7 @@ const app = await NestFactory.create<NestExpressApplication>(AppModule.forRoot(c
   bodyParser: false,
   // A browser keeps its connections open; without this a stop would wait for them.
   forceCloseConnections: true,
-  logger: new ConsoleLogger({ logLevels: ['log', 'warn', 'error', 'fatal'], colors: false }),
+  logger: new ConsoleLogger({ logLevels: ['warn', 'error', 'fatal'], colors: false }),
 })
 const dataSource = app.get(DataSource)
 await requirePlainRole(dataSource)

@@ -7,7 +7,9 @@ import { readConfig } from './platform/config/read-config.js'
 
 // The server works the queue off; here it would only wait for a mail server that has not started yet.
 const config = readConfig({ ...process.env, QUEUE: 'off' })
-const app = await NestFactory.createApplicationContext(AppModule.forRoot(config), { logger: ['warn', 'error'] })
+const app = await NestFactory.createApplicationContext(AppModule.forRoot(config), {
+  logger: ['warn', 'error'],
+})
 try {
   const { runFolder, secrets } = config
   const said = await seedDistricts(app, {

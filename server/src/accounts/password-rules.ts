@@ -5,14 +5,18 @@ const guessable = ['password', 'wadestone', 'letmein', 'qwerty', '1234567890', '
 
 const plain = (text: string): string => text.toLowerCase().replace(/[^\p{L}\p{N}]/gu, '')
 
-/** Does the password still say enough when such a word is taken out of it? */
-const leansOn = (password: string, word: string): boolean =>
-  word.length >= 4 && plain(password).includes(word) && plain(password).replaceAll(word, '').length < 8
+/** The easy words of a password, when it no longer says enough once all of them are taken out. */
+function leansOn(password: string, words: readonly string[]): string[] {
+  const text = plain(password)
+  const easy = words.filter((word) => word.length >= 4 && text.includes(word))
+  const rest = easy.reduce((left, word) => left.replaceAll(word, ''), text)
+  return rest.length < 8 ? easy : []
+}
 
 /** Length is checked by the schema; this refuses what is long and still easy. */
 export function refuseWeakPassword(password: string, about: { name: string; email: string }): void {
   const own = [...about.name.split(/\s+/), about.email.split('@')[0] ?? ''].map(plain)
-  const word = [...guessable, ...own].find((each) => leansOn(password, each))
+  const [word] = leansOn(password, [...guessable, ...own])
   const isOneSign = new Set(password).size < 5
   if (word === undefined && !isOneSign) return
   const message =

@@ -55,7 +55,13 @@ export const demoActs: Readonly<Record<DemoAct, Perform>> = {
 }
 
 /** An act belongs to a session, as everywhere; it ends with the act, so that nobody is left signed in. */
-async function apply({ acts, sessions }: DemoServices, tx: Tx, asking: Asking, job: Job, act: Act): Promise<void> {
+async function apply(
+  { acts, sessions }: DemoServices,
+  tx: Tx,
+  asking: Asking,
+  job: Job,
+  act: Act,
+): Promise<void> {
   const { personId, districtId } = asking.actor
   const own = asking.onlyJobId === null ? {} : { jobId: asking.onlyJobId }
   const start = { personId, districtId, userAgent, ...own }
@@ -73,11 +79,17 @@ interface MadePacket {
 
 async function packetOf({ manager, districtId }: Tx, { packetId, title }: Job): Promise<MadePacket> {
   const packet = packetId === null ? null : await manager.findOneBy(Packet, { districtId, id: packetId })
-  if (packet?.sha256 == null) throw new Error(`The packet of the example job "${title}" is not made.`)
+  if (packet === null || packet.sha256 === null)
+    throw new Error(`The packet of the example job "${title}" is not made.`)
   return { id: packet.id, sha256: packet.sha256, pages: packet.pages?.length ?? 0 }
 }
 
-async function readPages({ readings }: DemoServices, tx: Tx, landowner: Asking, packet: MadePacket): Promise<void> {
+async function readPages(
+  { readings }: DemoServices,
+  tx: Tx,
+  landowner: Asking,
+  packet: MadePacket,
+): Promise<void> {
   for (let page = 1; page <= packet.pages; page += 1) {
     await readings.read(actingAs(tx, landowner), landowner, { packetId: packet.id, page })
   }

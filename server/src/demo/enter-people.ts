@@ -26,7 +26,12 @@ interface NewSignIn {
  * Districts and their people, in one transaction. The passwords are on disk before the database knows them, so that
  * nobody is left with one that was never written down; where the file was lost everybody gets a new one.
  */
-export async function enterPeople({ work, districts, runFolder, hashPassword }: PeopleToEnter): Promise<void> {
+export async function enterPeople({
+  work,
+  districts,
+  runFolder,
+  hashPassword,
+}: PeopleToEnter): Promise<void> {
   const isEntered = await work.runForAccounts((tx) => haveAll(tx, districts))
   if (isEntered && hasSignIns(runFolder)) return
   const made: NewSignIn[] = []

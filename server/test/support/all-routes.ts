@@ -3,6 +3,7 @@ import { ModulesContainer } from '@nestjs/core'
 import type { Express } from 'express'
 import { publicKey } from '../../src/platform/auth/public.decorator'
 import { requiresKey, type Requirement } from '../../src/platform/auth/requires.decorator'
+import { uploadKey } from '../../src/platform/auth/upload.decorator'
 import type { TestApp } from './test-app'
 
 export interface Route {
@@ -12,6 +13,8 @@ export interface Route {
   path: string
   /** Null when the handler says nothing of who may call it. */
   access: Requirement | 'public' | null
+  /** Takes one file instead of JSON. */
+  isUpload: boolean
 }
 
 type Handler = (...given: unknown[]) => unknown
@@ -34,8 +37,12 @@ function routesOf(controller: object & { prototype?: unknown }): Route[] {
     if (handler === undefined || method === undefined) return []
     const path = `/${prefix}/${Reflect.getMetadata('path', handler)}`.replace(/\/+/g, '/').replace(/\/$/, '')
     const verb = RequestMethod[method] ?? ''
-    const access = Reflect.getMetadata(publicKey, handler) ? 'public' : Reflect.getMetadata(requiresKey, handler)
-    return [{ name: `${verb} ${path}`, method: verb.toLowerCase() as Route['method'], path, access: access ?? null }]
+    const access = Reflect.getMetadata(publicKey, handler)
+      ? 'public'
+      : (Reflect.getMetadata(requiresKey, handler) ?? null)
+    const isUpload = Reflect.getMetadata(uploadKey, handler) === true
+    const name = `${verb} ${path}`
+    return [{ name, method: verb.toLowerCase() as Route['method'], path, access, isUpload }]
   })
 }
 

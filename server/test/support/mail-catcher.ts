@@ -2,17 +2,24 @@ import type { AddressInfo } from 'node:net'
 import { simpleParser, type ParsedMail } from 'mailparser'
 import { SMTPServer } from 'smtp-server'
 
-/** A real SMTP server on loopback that keeps what it is given. */
+export const refusal = 'Mailbox not available'
+
+/** A real SMTP server on loopback that keeps what it is given, or refuses it when a test says so. */
 export class MailCatcher {
   readonly mails: ParsedMail[] = []
+  readonly refused: ParsedMail[] = []
+  /** The answers to the next messages, such as 450; when none is left messages are taken. */
+  refusals: number[] = []
   private readonly server = new SMTPServer({
     authOptional: true,
     disabledCommands: ['STARTTLS'],
     onData: (stream, _session, done) => {
       simpleParser(stream).then(
         (mail) => {
-          this.mails.push(mail)
-          done()
+          const responseCode = this.refusals.shift()
+          const box = responseCode === undefined ? this.mails : this.refused
+          box.push(mail)
+          done(responseCode === undefined ? null : Object.assign(new Error(refusal), { responseCode }))
         },
         (error: Error) => done(error),
       )

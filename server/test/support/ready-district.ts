@@ -13,6 +13,7 @@ import { SchedulesService } from '../../src/schedules/schedules.service'
 import { makeDistrict } from '../factories/district-people'
 import type { ApiClient } from './api-client'
 import { readExample } from './example'
+import { openSession } from './open-session'
 import type { TestApp } from './test-app'
 
 export const testPassword = 'a sentence long enough for a test'
@@ -46,18 +47,22 @@ export interface ReadyDistrict extends Record<Staff, Member> {
   districtId: string
 }
 
+/** Hashed once for all: it takes long on purpose. */
+let passwordHash: Promise<string> | undefined
+
 /** A district with its people signed in, settings entered, and criteria, costs and schedules in force. */
 export async function makeReadyDistrict(app: TestApp, name: string): Promise<ReadyDistrict> {
   const districtId = randomUUID()
-  const passwordHash = await hashPassword(testPassword, app.config.secrets.passwordPepper)
+  passwordHash ??= hashPassword(testPassword, app.config.secrets.passwordPepper)
+  const hash = await passwordHash
   const people = await app.inDistrict(districtId, async (tx) => {
     await makeDistrict(tx, name)
     await putRulesInForce(app, tx)
-    return makeStaff(tx, passwordHash)
+    return makeStaff(tx, hash)
   })
   const members: Partial<Record<Staff, Member>> = {}
   for (const [role, person] of Object.entries(people)) {
-    const api = await app.client().signIn({ email: person.email, password: testPassword })
+    const { api } = await openSession(app, { personId: person.personId, districtId })
     members[role as Staff] = { ...person, api }
   }
   return { districtId, ...(members as Record<Staff, Member>) }
@@ -95,5 +100,9 @@ async function putRulesInForce({ nest }: TestApp, tx: Tx): Promise<void> {
   const costs = nest.get(CostListsService, { strict: false })
   await costs.putInForce(tx, (await costs.create(tx, job.costList)).id)
   const schedules = nest.get(SchedulesService, { strict: false })
-  for (const input of job.schedules) await schedules.putInForce(tx, (await schedules.create(tx, input)).id)
+  for (const input of job.schedules) {
+    // The funds of the example end with their year; these tests are to hold in any.
+    const { id } = await schedules.create(tx, { ...input, effectiveTo: '2126-09-30' })
+    await schedules.putInForce(tx, id)
+  }
 }

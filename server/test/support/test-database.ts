@@ -9,7 +9,7 @@ const appPassword = 'only-for-one-test-run'
 export interface TestDatabase {
   /** As the role the server uses. */
   appUrl: string
-  /** As the owner of the tables, who still is held by row security. */
+  /** As the owner of the tables. Of a cluster of our own that is also its superuser, whom row security does not bind. */
   owner: DataSource
   drop(): Promise<void>
 }

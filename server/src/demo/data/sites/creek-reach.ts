@@ -1,4 +1,4 @@
-import type { SurveyInput } from 'shared'
+import type { DesignPlan, SurveyInput } from 'shared'
 import { pointsAt, ringFence, type Pair } from './ring-fence.js'
 import { atLevel, type DemoSite, type SiteChoice } from './site.js'
 import { approachPad, beefHerd, usualParts } from './usual-parts.js'
@@ -10,22 +10,24 @@ const bank: Pair[] = [
   [34, 2.8],
   [42, 2.1],
   [47, 1.2],
+  [51, 0],
 ]
 
-/** Station and depth, ft, waded with a rod. */
+/** Station and depth below today's water, ft, waded with a rod in a dry week. */
 const bed: Pair[] = [
-  [51, 0],
-  [58, 0.9],
-  [66, 1.8],
-  [74, 2.4],
-  [84, 2.7],
-  [96, 2.6],
-  [106, 1.6],
+  [56, 0],
+  [66, 1.2],
+  [74, 1.8],
+  [84, 2.1],
+  [96, 2],
+  [106, 1],
 ]
+
+const todayBelowFt = 0.6
 
 const survey = (levelFt: number): SurveyInput => ({
   kind: 'ground-line',
-  waterSurfaceFt: levelFt,
+  waterSurfaceFt: atLevel(levelFt, -todayBelowFt),
   points: [
     ...bank.map(([stationFt, aboveFt]) => ({ stationFt, elevationFt: atLevel(levelFt, aboveFt) })),
     ...bed.map(([stationFt, waterDepthFt]) => ({ stationFt, waterDepthFt })),
@@ -40,14 +42,54 @@ const outline: Pair[] = [
 ]
 
 const round: Pair[] = [
-  [-218, 32],
+  [-218, 20],
   [-218, -94],
   [218, -94],
-  [218, 32],
+  [218, 20],
 ]
 
+const runoff: DesignPlan['runoff'] = {
+  areaAcres: 1.5,
+  curveNumber: 72,
+  rainfallIn: 4.6,
+  rainfallSource: '10-year 24-hour depth, invented for this example',
+  returnPeriodYr: 10,
+  distribution: 'II',
+  flowLengthFt: 380,
+  landSlopePercent: 4,
+}
+
+const berm: DesignPlan['berm'] = {
+  crestStationFt: 18,
+  channelGradeFtPerFt: 0.007,
+  groundFallFtPerFt: 0.025,
+  upslopeRunPerRise: 4,
+  downslopeRunPerRise: 4,
+  topWidthFt: 4,
+  roughnessHigh: 0.1,
+  roughnessLow: 0.04,
+  minimumHeightFt: 1,
+  pastLeftFt: 16,
+  pastRightFt: 45,
+  falls: 'right',
+  outletSurface: 'sod along the fence',
+  outletIsStable: true,
+  outletToRampFt: 58,
+  soil: 'sand-silt-loam',
+  cover: 'good',
+}
+
+/** Three feet beyond the toe: the ramp falls 3.75 ft, and its top lies 6 ft landward of the water's edge. */
+const panelEndFt = (gradeRunPerRise: number): number => 3 - 3.75 * gradeRunPerRise
+
 /** Four hundred feet of a slow creek, fenced on both banks. Running water is not stored, so there is no pond part. */
-export const creekReach = ({ levelFt, headCount, widthFt, gradeRunPerRise, funding }: SiteChoice): DemoSite => ({
+export const creekReach = ({
+  levelFt,
+  headCount,
+  widthFt,
+  gradeRunPerRise,
+  funding,
+}: SiteChoice): DemoSite => ({
   survey: survey(levelFt),
   plan: {
     inputVersion: 1,
@@ -57,7 +99,7 @@ export const creekReach = ({ levelFt, headCount, widthFt, gradeRunPerRise, fundi
       body: 'stream',
       fullPoolElevationFt: levelFt,
       lowWaterElevationFt: atLevel(levelFt, -1),
-      waterSurfaceTodayFt: levelFt,
+      waterSurfaceTodayFt: atLevel(levelFt, -todayBelowFt),
       floodPoolElevationFt: atLevel(levelFt, 1),
       soil: 'sandy loam over gravel',
       waterOutline: pointsAt(outline),
@@ -73,41 +115,14 @@ export const creekReach = ({ levelFt, headCount, widthFt, gradeRunPerRise, fundi
     fence: ringFence({
       round,
       rampWidthFt: widthFt,
-      laneFromFt: 32,
+      laneFromFt: 20,
       panelFromFt: 3,
-      panelToFt: -35,
+      panelToFt: panelEndFt(gradeRunPerRise),
       gateWidthFt: 14,
-      laneAreaFt2: 34 * widthFt,
+      laneAreaFt2: 24 * widthFt,
     }),
-    runoff: {
-      areaAcres: 1.5,
-      curveNumber: 72,
-      rainfallIn: 4.6,
-      rainfallSource: '10-year 24-hour depth, invented for this example',
-      returnPeriodYr: 10,
-      distribution: 'II',
-      flowLengthFt: 380,
-      landSlopePercent: 4,
-    },
-    berm: {
-      crestStationFt: 18,
-      channelGradeFtPerFt: 0.007,
-      groundFallFtPerFt: 0.025,
-      upslopeRunPerRise: 4,
-      downslopeRunPerRise: 4,
-      topWidthFt: 4,
-      roughnessHigh: 0.1,
-      roughnessLow: 0.04,
-      minimumHeightFt: 1,
-      pastLeftFt: 16,
-      pastRightFt: 45,
-      falls: 'right',
-      outletSurface: 'sod above the fence',
-      outletIsStable: true,
-      outletToRampFt: 58,
-      soil: 'sand-silt-loam',
-      cover: 'good',
-    },
+    runoff,
+    berm,
     funding,
   },
 })

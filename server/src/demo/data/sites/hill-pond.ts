@@ -1,4 +1,4 @@
-import type { LevelNoteRow, SurveyInput } from 'shared'
+import type { DesignPlan, LevelNoteRow, SurveyInput } from 'shared'
 import { pointsAt, ringFence, type Pair } from './ring-fence.js'
 import { atLevel, type DemoSite, type SiteChoice } from './site.js'
 import { approachPad, beefHerd, usualParts } from './usual-parts.js'
@@ -41,14 +41,14 @@ const outline: Pair[] = [
 ]
 
 const round: Pair[] = [
-  [-92, 30],
+  [-104, 18],
   [-165, -43],
   [-165, -177],
   [-92, -250],
   [92, -250],
   [165, -177],
   [165, -43],
-  [92, 30],
+  [104, 18],
 ]
 
 const survey = (levelFt: number): SurveyInput => {
@@ -62,8 +62,48 @@ const survey = (levelFt: number): SurveyInput => {
   }
 }
 
+const runoff: DesignPlan['runoff'] = {
+  areaAcres: 2.1,
+  curveNumber: 77,
+  rainfallIn: 4.6,
+  rainfallSource: '10-year 24-hour depth, invented for this example',
+  returnPeriodYr: 10,
+  distribution: 'II',
+  flowLengthFt: 460,
+  landSlopePercent: 5,
+}
+
+const berm: DesignPlan['berm'] = {
+  crestStationFt: 20,
+  channelGradeFtPerFt: 0.008,
+  groundFallFtPerFt: 0.032,
+  upslopeRunPerRise: 4,
+  downslopeRunPerRise: 4,
+  topWidthFt: 4,
+  roughnessHigh: 0.1,
+  roughnessLow: 0.04,
+  minimumHeightFt: 1,
+  pastLeftFt: 45,
+  pastRightFt: 16,
+  falls: 'left',
+  outletSurface: 'sod along the fence',
+  outletIsStable: true,
+  outletToRampFt: 60,
+  soil: 'sand-silt-loam',
+  cover: 'good',
+}
+
+/** Three feet beyond the toe: the ramp falls 7 ft, and its top lies 5 ft landward of the water's edge. */
+const panelEndFt = (gradeRunPerRise: number): number => 2 - 7 * gradeRunPerRise
+
 /** A pond of an acre and a quarter below a grassed hillside. */
-export const hillPond = ({ levelFt, headCount, widthFt, gradeRunPerRise, funding }: SiteChoice): DemoSite => ({
+export const hillPond = ({
+  levelFt,
+  headCount,
+  widthFt,
+  gradeRunPerRise,
+  funding,
+}: SiteChoice): DemoSite => ({
   survey: survey(levelFt),
   plan: {
     inputVersion: 1,
@@ -90,41 +130,14 @@ export const hillPond = ({ levelFt, headCount, widthFt, gradeRunPerRise, funding
     fence: ringFence({
       round,
       rampWidthFt: widthFt,
-      laneFromFt: 30,
+      laneFromFt: 18,
       panelFromFt: 3,
-      panelToFt: -47,
+      panelToFt: panelEndFt(gradeRunPerRise),
       gateWidthFt: 14,
-      laneAreaFt2: 34 * widthFt,
+      laneAreaFt2: 22 * widthFt,
     }),
-    runoff: {
-      areaAcres: 2.1,
-      curveNumber: 77,
-      rainfallIn: 4.6,
-      rainfallSource: '10-year 24-hour depth, invented for this example',
-      returnPeriodYr: 10,
-      distribution: 'II',
-      flowLengthFt: 460,
-      landSlopePercent: 5,
-    },
-    berm: {
-      crestStationFt: 20,
-      channelGradeFtPerFt: 0.008,
-      groundFallFtPerFt: 0.032,
-      upslopeRunPerRise: 4,
-      downslopeRunPerRise: 4,
-      topWidthFt: 4,
-      roughnessHigh: 0.1,
-      roughnessLow: 0.04,
-      minimumHeightFt: 1,
-      pastLeftFt: 45,
-      pastRightFt: 16,
-      falls: 'left',
-      outletSurface: 'sod below the fence',
-      outletIsStable: true,
-      outletToRampFt: 60,
-      soil: 'sand-silt-loam',
-      cover: 'good',
-    },
+    runoff,
+    berm,
     pond: {
       stages: [
         { elevationFt: atLevel(levelFt, -4), areaFt2: 37_500 },

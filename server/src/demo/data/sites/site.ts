@@ -16,4 +16,5 @@ export interface DemoSite {
 }
 
 /** Elevations come out of sums; a hundredth of a foot is what the rod was read to. */
-export const atLevel = (levelFt: number, aboveFt: number): number => Math.round((levelFt + aboveFt) * 100) / 100
+export const atLevel = (levelFt: number, aboveFt: number): number =>
+  Math.round((levelFt + aboveFt) * 100) / 100

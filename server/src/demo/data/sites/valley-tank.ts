@@ -1,4 +1,4 @@
-import type { SurveyInput } from 'shared'
+import type { DesignPlan, SurveyInput } from 'shared'
 import { pointsAt, ringFence, type Pair } from './ring-fence.js'
 import { atLevel, type DemoSite, type SiteChoice } from './site.js'
 import { approachPad, beefHerd, usualParts } from './usual-parts.js'
@@ -46,18 +46,58 @@ const outline: Pair[] = [
 ]
 
 const round: Pair[] = [
-  [-72, 28],
+  [-76, 24],
   [-133, -33],
   [-133, -142],
   [-67, -208],
   [67, -208],
   [133, -142],
   [133, -33],
-  [72, 28],
+  [76, 24],
 ]
 
+const runoff: DesignPlan['runoff'] = {
+  areaAcres: 2.8,
+  curveNumber: 74,
+  rainfallIn: 3.9,
+  rainfallSource: '10-year 24-hour depth, invented for this example',
+  returnPeriodYr: 10,
+  distribution: 'II',
+  flowLengthFt: 600,
+  landSlopePercent: 3.5,
+}
+
+const berm: DesignPlan['berm'] = {
+  crestStationFt: 20,
+  channelGradeFtPerFt: 0.006,
+  groundFallFtPerFt: 0.03,
+  upslopeRunPerRise: 4,
+  downslopeRunPerRise: 4,
+  topWidthFt: 4,
+  roughnessHigh: 0.12,
+  roughnessLow: 0.045,
+  minimumHeightFt: 1,
+  pastLeftFt: 20,
+  pastRightFt: 50,
+  falls: 'right',
+  outletSurface: 'sod along the fence',
+  outletIsStable: true,
+  outletToRampFt: 65,
+  soil: 'clay',
+  cover: 'fair',
+}
+
+/** Three feet beyond the toe: the ramp falls 7.25 ft, and its top lies 7 ft landward of the water's edge. */
+const panelEndFt = (gradeRunPerRise: number): number => 4 - 7.25 * gradeRunPerRise
+
 /** A small clay tank in a draw, sounded by boat. */
-export const valleyTank = ({ levelFt, headCount, widthFt, gradeRunPerRise, funding }: SiteChoice): DemoSite => ({
+export const valleyTank = ({
+  levelFt,
+  headCount,
+  widthFt,
+  gradeRunPerRise,
+  funding,
+}: SiteChoice): DemoSite => ({
   survey: survey(levelFt),
   plan: {
     inputVersion: 1,
@@ -84,41 +124,14 @@ export const valleyTank = ({ levelFt, headCount, widthFt, gradeRunPerRise, fundi
     fence: ringFence({
       round,
       rampWidthFt: widthFt,
-      laneFromFt: 28,
+      laneFromFt: 24,
       panelFromFt: 4,
-      panelToFt: -56,
+      panelToFt: panelEndFt(gradeRunPerRise),
       gateWidthFt: 16,
-      laneAreaFt2: 30 * widthFt,
+      laneAreaFt2: 28 * widthFt,
     }),
-    runoff: {
-      areaAcres: 2.8,
-      curveNumber: 74,
-      rainfallIn: 3.9,
-      rainfallSource: '10-year 24-hour depth, invented for this example',
-      returnPeriodYr: 10,
-      distribution: 'II',
-      flowLengthFt: 600,
-      landSlopePercent: 3.5,
-    },
-    berm: {
-      crestStationFt: 20,
-      channelGradeFtPerFt: 0.006,
-      groundFallFtPerFt: 0.03,
-      upslopeRunPerRise: 4,
-      downslopeRunPerRise: 4,
-      topWidthFt: 4,
-      roughnessHigh: 0.12,
-      roughnessLow: 0.045,
-      minimumHeightFt: 1,
-      pastLeftFt: 20,
-      pastRightFt: 50,
-      falls: 'right',
-      outletSurface: 'sod below the fence',
-      outletIsStable: true,
-      outletToRampFt: 65,
-      soil: 'clay',
-      cover: 'fair',
-    },
+    runoff,
+    berm,
     pond: {
       stages: [
         { elevationFt: atLevel(levelFt, -4), areaFt2: 16_400 },
