@@ -6,6 +6,7 @@ import { MailService } from '../mail/mail.service.js'
 import { Config } from '../platform/config/config.js'
 import { UnitOfWork } from '../platform/database/unit-of-work.js'
 import type { AccountsTx } from '../platform/database/tx.js'
+import { EventLog } from '../platform/events/event-log.service.js'
 import { EntryCode } from './entry-code.entity.js'
 import type { EntryLink } from './entry-link.entity.js'
 import { EntryLinksService } from './entry-links.service.js'
@@ -26,6 +27,7 @@ export class EntryService {
     private readonly links: EntryLinksService,
     private readonly sessions: SessionsService,
     private readonly mail: MailService,
+    private readonly events: EventLog,
   ) {}
 
   /** Mails a new code; the one before it is spent. */
@@ -80,7 +82,16 @@ export class EntryService {
     if (session === null) {
       throw new Problem('wrong-code', { detail: 'Check the six digits, or ask for a new code.' })
     }
+    await this.note(session)
     return session
+  }
+
+  /** That the person came by link and code is part of what a signature stands on. */
+  private async note({ id: sessionId, personId, districtId, jobId }: Session): Promise<void> {
+    if (jobId === null) return
+    await this.unitOfWork.run({ personId, districtId }, (tx) =>
+      this.events.append(tx, { streamId: jobId, kind: 'came-by-link', facts: { sessionId } }),
+    )
   }
 
   /** Counts the try and marks the code used in one statement, so that two tries at once cannot share it. */

@@ -5,6 +5,7 @@ import { Problem, type JobInput } from 'shared'
 import { District } from '../districts/district.entity.js'
 import { civilDateIn } from '../platform/clock/civil-date.js'
 import type { Tx } from '../platform/database/tx.js'
+import { EventLog } from '../platform/events/event-log.service.js'
 import { Producer } from '../producers/producer.entity.js'
 import { JobProducer } from './job-producer.entity.js'
 import { jobNumber } from './job-number.js'
@@ -14,6 +15,8 @@ import { searchText } from './search-text.js'
 /** Opens a job as a draft under the district's next number. */
 @Injectable()
 export class CreateJobService {
+  constructor(private readonly events: EventLog) {}
+
   async create(tx: Tx, createdBy: string, { producerIds, ...input }: JobInput): Promise<Job> {
     const producers = await this.producersOf(tx, producerIds)
     const number = await this.takeNumber(tx)
@@ -41,6 +44,8 @@ export class CreateJobService {
         isSigner: true,
       })),
     )
+    const facts = { producerIds: [...producerIds] }
+    await this.events.append(tx, { streamId: job.id, kind: 'job-created', facts })
     return tx.manager.findOneByOrFail(Job, { districtId: tx.districtId, id: job.id })
   }
 

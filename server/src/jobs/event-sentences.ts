@@ -43,14 +43,16 @@ const otherSentences = {
   'design-saved': (e) => `${e.who} saved the design "${e.design}".`,
   'design-chosen': (e) => `${e.who} chose the design "${e.design}".`,
   'revision-frozen': (e) => `${e.who} froze the design "${e.design}" as ${revision(e)}.`,
-  'packet-asked': (e) => `${e.who} asked for the packet of ${revision(e)}.`,
+  'packet-asked': (e) =>
+    e.facts['kind'] === 'B'
+      ? `The approved packet of ${revision(e)} was begun.`
+      : `${e.who} asked for the packet of ${revision(e)}.`,
   'packet-ready': (e) => `Packet ${String(e.facts['kind'] ?? 'A')} of ${revision(e)} was made.`,
   'packet-failed': (e) => `Packet ${String(e.facts['kind'] ?? 'A')} of ${revision(e)} could not be made.`,
   'technically-checked': (e) =>
     e.facts['withinLimits'] === false
       ? `${e.who} checked ${revision(e)}, which is beyond that person's limits.`
       : `${e.who} checked ${revision(e)}.`,
-  'link-opened': (e) => `${e.who} opened the mailed link.`,
   'came-by-link': (e) => `${e.who} came in by the mailed link and code.`,
   'consent-given': (e) => `${e.who} agreed to electronic records.`,
   'consent-withdrawn': (e) => `${e.who} no longer agrees to electronic records.`,
@@ -59,7 +61,6 @@ const otherSentences = {
   'note-written': (e) => `${e.who} wrote a note.`,
   'note-answered': (e) => `${e.who} answered a note.`,
   'note-settled': (e) => `${e.who} settled a note.`,
-  'mail-queued': () => 'A message was put in the post.',
   'mail-sent': () => 'A message went out.',
   'mail-failed': () => 'A message could not be delivered.',
 } as const satisfies Record<string, Sentence>
