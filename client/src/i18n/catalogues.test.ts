@@ -16,15 +16,16 @@ const entriesOf = (catalogue: object, under = ''): Entry[] =>
 
 const english = entriesOf(en)
 const spanish = new Map(entriesOf(es).map(({ key, words }) => [key, words]))
-const gapsIn = (words = ''): string[] => [...words.matchAll(/\{\{(\w+)\}\}/g)].map(([gap]) => gap).sort()
+const gapsIn = (words = ''): string => (words.match(/\{\{\w+\}\}/g) ?? []).sort().join(' ')
 
 describe('what a landowner reads', () => {
   it('has the same keys in English and in Spanish', () => {
     expect([...spanish.keys()].sort()).toEqual(english.map(({ key }) => key).sort())
   })
 
-  it.each(english)('has the same gaps to fill in both languages: $key', ({ key, words }) => {
-    expect(gapsIn(spanish.get(key))).toEqual(gapsIn(words))
+  it('has the same gaps to fill in both languages', () => {
+    const unlike = english.filter(({ key, words }) => gapsIn(spanish.get(key)) !== gapsIn(words))
+    expect(unlike).toEqual([])
   })
 
   it('leaves no sentence empty in either language', () => {

@@ -113,7 +113,6 @@ export const en = {
     acting: 'Signing…',
     cannotUndo:
       'After you sign, the packet goes to the supervisor. Until it is approved you may take it back.',
-    blocked: 'You cannot sign yet',
     fingerprint: 'Fingerprint of this packet',
     must: 'Tick that you mean this as your signature',
     done: 'You have signed',

@@ -114,7 +114,6 @@ export const es: Catalogue = {
     act: 'Firmar la revisión {{revision}}',
     acting: 'Firmando…',
     cannotUndo: 'Después de firmar, pasa al supervisor. Hasta que se apruebe, puede retirar su firma.',
-    blocked: 'Todavía no puede firmar',
     fingerprint: 'Huella de este expediente',
     must: 'Marque que esto es su firma',
     done: 'Usted ha firmado',

@@ -12,7 +12,7 @@ export function CostListsPage() {
   const query = useQuery(costListsQuery)
   const newList = may('schedule:write') && <LinkButton to="/cost-lists/new" words="New list" isMain />
   return (
-    <Page title="Unit costs" action={newList}>
+    <Page title="Prices" beside="unit costs that designs are priced with" action={newList}>
       <QueryGate query={query}>
         {(lists) =>
           lists.length > 0 ? (

@@ -1,6 +1,7 @@
 import { useState } from 'react'
 import { useTranslation } from 'react-i18next'
 import type { JobView, PacketView } from 'shared'
+import { Section } from '../components/layout/section'
 import { AfterAct } from '../features/landowner/after-act'
 import { ConsentForm } from '../features/landowner/consent-form'
 import { LandownerPage } from '../features/landowner/landowner-page'
@@ -58,7 +59,9 @@ function ToSign({ job, packet, onSigned }: ToSignProps) {
   return (
     <LandownerPage title={t('sign.title', { revision: packet.revision })}>
       <WhatIsSigned job={job} packet={packet} />
-      <StepsList jobId={job.id} steps={signingSteps(job, packet)} />
+      <Section title={t('job.steps')}>
+        <StepsList jobId={job.id} steps={signingSteps(job, packet)} />
+      </Section>
       {!packet.iHaveConsented && <ConsentForm packetId={packet.id} />}
       <SignForm job={job} packet={packet} onSigned={onSigned} />
     </LandownerPage>

@@ -1,5 +1,6 @@
 import { useCallback, useEffect, useState } from 'react'
 import { get, type DefaultValues, type FieldValues, type Path, type PathValue } from 'react-hook-form'
+import { flushSync } from 'react-dom'
 import type { z } from 'zod'
 import { useSchemaForm } from './use-schema-form'
 
@@ -24,7 +25,8 @@ export function useFilledForm<In extends FieldValues, Out>(schema: z.ZodType<Out
           // Later, because fields that hear of this change after us would fall back again.
           queueMicrotask(() => {
             if (getValues(name as Path<In>) !== undefined) return
-            setValue(name as Path<In>, null as PathValue<In, Path<In>>)
+            // At once, so that the old value is not seen, nor typed into, in between.
+            flushSync(() => setValue(name as Path<In>, null as PathValue<In, Path<In>>))
           })
         },
       }),

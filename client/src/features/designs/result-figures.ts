@@ -45,9 +45,8 @@ const makers: Makers = {
 }
 
 /** The figures of one part that could be worked out; null where this job has no such part. */
-export function resultFigures<Key extends ResultKey>(
-  key: Key,
-  value: ReadyValue<Key> | null,
-): FigureLine[] | null {
-  return value === null ? null : makers[key](value)
+export function resultFigures(key: ResultKey, value: unknown): FigureLine[] | null {
+  // The key picks value and maker together; the compiler cannot follow that through the union of all parts.
+  const make = makers[key] as (value: unknown) => FigureLine[]
+  return value === null ? null : make(value)
 }

@@ -43,15 +43,7 @@ export function ResultPanel({ resultKey, result, part, designPath }: ResultPanel
       </Section>
     )
   }
-  // The key picks value and maker together; the compiler cannot follow that through the union of all parts.
-  const figures = resultFigures(
-    resultKey as 'rock',
-    found.value as DesignResult['rock'] extends infer Rock
-      ? Extract<Rock, { ok: true }> extends { value: infer Value }
-        ? Value
-        : never
-      : never,
-  )
+  const figures = resultFigures(resultKey, found.value)
   return (
     <Section title={title} aside={<VerdictMark kind="pass" words="worked out" />}>
       {figures === null || figures.length === 0 ? (

@@ -54,10 +54,12 @@ export function SignForm({ job, packet, onSigned }: SignFormProps) {
           autoComplete="name"
         />
         <CheckField name="intends" label={t('sign.intent')} />
+        <Typography variant="body2" sx={{ color: 'text.secondary' }}>
+          {t('sign.cannotUndo')}
+        </Typography>
       </Box>
       <FootBar>
         <Typography variant="body2">{t('job.noStart')}</Typography>
-        {reasons.length > 0 && <Typography sx={{ fontWeight: 600 }}>{t('sign.blocked')}</Typography>}
         <ActButton
           words={t('sign.act', { revision: packet.revision })}
           busyWords={t('sign.acting')}
@@ -66,9 +68,6 @@ export function SignForm({ job, packet, onSigned }: SignFormProps) {
           isMain
           onAct={() => void sign()}
         />
-        <Typography variant="body2" sx={{ color: 'text.secondary' }}>
-          {t('sign.cannotUndo')}
-        </Typography>
       </FootBar>
     </ActForm>
   )

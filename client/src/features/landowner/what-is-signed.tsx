@@ -34,7 +34,7 @@ export function WhatIsSigned({ job, packet }: WhatIsSignedProps) {
           }
         />
         {money && <FigureRow label={t('sign.whole')} value={money.whole} />}
-        {money && <FigureRow label={t('sign.funds')} value={money.funds} />}
+        {money && <FigureRow label={t('sign.funds')} value={`−${money.funds}`} />}
         {money && <FigureRow label={t('sign.share')} value={money.share} isSum />}
       </FigureRows>
       <Typography variant="body2" sx={{ color: 'text.secondary', mt: 3, overflowWrap: 'anywhere' }}>

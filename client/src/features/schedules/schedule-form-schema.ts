@@ -22,7 +22,10 @@ export const scheduleFormSchema = readSchema(scheduleInputSchema, (typed: Schedu
   const foreign = kindTerms.filter((term) => !hasTerm(typed.kind, term))
   const kept = Object.entries(typed).filter(([name]) => !foreign.some((term) => term === name))
   // A line that pays for nothing of ours says so: that null is no emptied box.
-  const lines = typed.lines.map((line) => ({ ...(withoutEmpty(line) as typeof line), quantityKey: line.quantityKey }))
+  const lines = typed.lines.map((line) => ({
+    ...(withoutEmpty(line) as typeof line),
+    quantityKey: line.quantityKey,
+  }))
   const terms = withoutEmpty(Object.fromEntries(kept)) as Partial<ScheduleFields>
   return { ...terms, lines: hasTerm(typed.kind, 'lines') ? lines : [] }
 })

@@ -19,6 +19,12 @@ interface SettingsFormProps {
 export function SettingsForm({ view }: SettingsFormProps) {
   const settings = useSettingsForm(view)
   const { form, seen, newer, hasChanges } = settings
+  const isPressed = form.formState.submitCount > 0
+  const statusWords = settings.isSaved
+    ? 'The settings are saved.'
+    : isPressed && !hasChanges
+      ? 'Nothing is changed, so nothing was saved.'
+      : null
   return (
     <>
       <LeaveGuard hasUnsaved={hasChanges} />
@@ -55,9 +61,7 @@ export function SettingsForm({ view }: SettingsFormProps) {
           }}
         >
           <SubmitButton words="Save the settings" busyWords="Saving…" />
-          <StatusLine
-            words={settings.isSaved ? 'The settings are saved.' : hasChanges ? null : 'Nothing is changed.'}
-          />
+          <StatusLine words={statusWords} />
         </Box>
       </Form>
     </>
