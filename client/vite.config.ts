@@ -14,7 +14,15 @@ export default defineConfig({
   build: {
     target: 'es2022',
     // shared is pure, so what a page does not use of it is left out of its file.
-    rolldownOptions: { treeshake: { moduleSideEffects: (id) => !id.includes('/shared/src/') } },
+    rolldownOptions: {
+      treeshake: { moduleSideEffects: (id) => !id.includes('/shared/src/') },
+      // A file of its own runs before the file with the schemas does.
+      output: {
+        codeSplitting: {
+          groups: [{ name: 'zod-without-eval', test: /zod-without-eval|zod\/v4\/core\/core/ }],
+        },
+      },
+    },
   },
   test: {
     environment: 'jsdom',

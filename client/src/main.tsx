@@ -1,3 +1,4 @@
+import './app/zod-without-eval'
 import '@fontsource/source-sans-3/latin-400.css'
 import '@fontsource/source-sans-3/latin-600.css'
 import { StrictMode } from 'react'

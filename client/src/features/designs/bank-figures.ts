@@ -35,17 +35,11 @@ export const earthworkFigures = ({
   line('Backfill at the edges', averageEndArea.edgeBackfillYd3, 'yd³', 1),
 ]
 
-export const rockFigures = ({
-  layers,
-  totalThicknessIn,
-  totalOrderTons,
-}: PartValues['rock']): FigureLine[] => [
-  ...layers.flatMap(({ name, orderTons, loads }) => [
-    line(`${name}, to order`, orderTons, 'tons', 1),
-    ...lineIfAny(`${name}, loads`, loads, undefined, 0),
-  ]),
-  line('Thickness in all', totalThicknessIn, 'in', 1),
-  { ...line('Stone to order', totalOrderTons, 'tons', 1), isSum: true },
+export const rockFigures = (rock: PartValues['rock']): FigureLine[] => [
+  ...rock.layers.map(({ name, orderTons }) => line(`${name}, to order`, orderTons, 'tons', 1)),
+  { ...line('Stone to order', rock.totalOrderTons, 'tons', 1), isSum: true },
+  ...rock.layers.flatMap(({ name, loads }) => lineIfAny(`${name}, loads`, loads, undefined, 0)),
+  line('Thickness in all', rock.totalThicknessIn, 'in', 1),
 ]
 
 export const fabricFigures = (fabric: PartValues['fabric']): FigureLine[] => {

@@ -10,7 +10,7 @@ export const pointsSpec: ListSpec = {
   hint: 'In order along the run. East and north from the middle of the ramp at station 0+00.',
   empty: {},
   isOrdered: true,
-  column: 120,
+  isCompact: true,
   items: [number('eastFt', 'East', 'ft'), number('northFt', 'North', 'ft')],
 }
 

@@ -1,4 +1,4 @@
-import { moneyText, unitText, type DesignResult, type PartValues } from 'shared'
+import { formatQuantity, moneyText, type DesignResult, type PartValues } from 'shared'
 import { line, lineIfAny, said, type FigureLine } from './figure-line'
 
 const FT2_PER_ACRE = 43_560
@@ -23,7 +23,7 @@ export const runoffFigures = (runoff: PartValues['runoff']): FigureLine[] => [
   line('Time of concentration', runoff.timeOfConcentrationHr, 'h'),
   ...lineIfAny('Peak, curve number', runoff.graphicalPeakCfs, 'ft³/s', 1),
   ...lineIfAny('Peak, rational', runoff.rationalPeakCfs, 'ft³/s', 1),
-  { ...line('Design peak', runoff.designPeakCfs, 'ft³/s', 1), isSum: true },
+  line('Design peak', runoff.designPeakCfs, 'ft³/s', 1),
 ]
 
 export const bermFigures = (berm: PartValues['berm']): FigureLine[] => [
@@ -51,11 +51,11 @@ export const seedingFigures = (seeding: PartValues['seeding']): FigureLine[] => 
 type Ready<Part> = Extract<Part, { ok: true }> extends { value: infer Value } ? Value : never
 
 export const quantityFigures = (quantities: Ready<DesignResult['quantities']>): FigureLine[] =>
-  quantities.map(({ description, quantity, unit }) => line(description, quantity, unitText(unit, quantity)))
+  quantities.map(({ description, quantity, unit }) => said(description, formatQuantity(quantity, unit)))
 
 export const costFigures = ({ low, typical, high }: Ready<DesignResult['cost']>): FigureLine[] => [
   said('Low', moneyText(low)),
-  { ...said('Typical', moneyText(typical)), isSum: true },
+  said('Typical', moneyText(typical)),
   said('High', moneyText(high)),
 ]
 

@@ -28,8 +28,8 @@ export interface ListSpec {
   empty: Readonly<Record<string, unknown>>
   /** The order of the rows means something, so they can be moved. */
   isOrdered?: boolean
-  /** Least width of a column of fields, px. */
-  column?: number
+  /** Rows of two or three short figures stand on one line each. */
+  isCompact?: boolean
 }
 
 /** A part of a part that a job may do without. */

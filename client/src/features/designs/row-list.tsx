@@ -16,6 +16,15 @@ interface TakenOut {
   value: unknown
 }
 
+const fullRow = { borderBottom: 1, borderColor: 'divider', pt: 2, pb: 1 }
+const compactRow = {
+  ...fullRow,
+  display: 'grid',
+  gridTemplateColumns: { xs: '100%', md: '260px minmax(0, 1fr)' },
+  alignItems: 'center',
+  '& > div': { my: 1 },
+}
+
 const capital = (word: string): string => word.charAt(0).toUpperCase() + word.slice(1)
 
 /** Rows of the plan, each a small form; a row that was taken out can be put back. */
@@ -47,7 +56,7 @@ export function RowList({ name, spec }: RowListProps) {
           key={row.id}
           role="group"
           aria-label={`${one} ${index + 1}`}
-          sx={{ borderBottom: 1, borderColor: 'divider', pt: 2, pb: 1 }}
+          sx={spec.isCompact ? compactRow : fullRow}
         >
           <Box sx={{ display: 'flex', flexWrap: 'wrap', alignItems: 'baseline', gap: 4 }}>
             <Typography sx={{ fontWeight: 600 }}>
@@ -62,7 +71,7 @@ export function RowList({ name, spec }: RowListProps) {
               Take out<span className="visually-hidden"> {`${spec.one} ${index + 1}`}</span>
             </Button>
           </Box>
-          <PartItems items={spec.items} under={`${name}.${index}`} column={spec.column ?? 184} />
+          <PartItems items={spec.items} under={`${name}.${index}`} column={spec.isCompact ? 150 : 184} />
         </Box>
       ))}
       {typeof error === 'string' && (

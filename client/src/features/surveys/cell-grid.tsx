@@ -66,7 +66,11 @@ export function CellGrid(props: CellGridProps) {
         </Typography>
       )}
       <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: 3, alignItems: 'center', mt: 3 }}>
-        <Button aria-disabled={grid.steps === 0} onClick={grid.undo}>
+        <Button
+          aria-disabled={grid.steps === 0}
+          onClick={grid.undo}
+          sx={grid.steps === 0 ? { color: 'text.secondary', borderColor: 'divider' } : undefined}
+        >
           Undo the last change
         </Button>
         <Typography variant="body2" sx={{ color: 'text.secondary' }}>

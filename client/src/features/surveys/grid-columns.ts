@@ -26,18 +26,18 @@ const text = (key: string, title: string, width: number): GridColumn => ({
 })
 
 const station: GridColumn = {
-  ...{ key: 'stationFt', title: 'Station', width: 92, write: writeStation },
+  ...{ key: 'stationFt', title: 'Station', width: 84, write: writeStation },
   read: (typed) => parseStation(typed) ?? typed,
 }
 
 const figure = (key: string, title: string): GridColumn => ({
-  ...{ key, title, width: 92, write: plain },
+  ...{ key, title, width: 84, write: plain },
   read: (typed) => parseQuantity(typed) ?? typed,
 })
 
 /** In the order of a field book; heights of instrument and elevations are worked out between them. */
 export const noteColumns: readonly GridColumn[] = [
-  text('label', 'Point', 168),
+  text('label', 'Point', 150),
   station,
   figure('backsightFt', 'Backsight'),
   figure('intermediateFt', 'Intermediate'),

@@ -36,7 +36,7 @@ export const GridLine = memo(function GridLine(props: GridLineProps) {
   const { rowMessage, cellMessages } = rowMessages(errors, columns)
   return (
     <>
-      <TableRow>
+      <TableRow sx={{ '& > td': { verticalAlign: 'middle', fontSize: '0.9375rem' } }}>
         <TableCell className="figure" sx={{ color: 'text.secondary', width: 32, textAlign: 'right' }}>
           {index + 1}
         </TableCell>
@@ -60,7 +60,7 @@ export const GridLine = memo(function GridLine(props: GridLineProps) {
             )}
           </Fragment>
         ))}
-        <TableCell sx={{ whiteSpace: 'nowrap', py: '0 !important', pl: '12px !important' }}>
+        <TableCell sx={{ whiteSpace: 'nowrap', py: '0 !important', pl: '8px !important' }}>
           <Button
             variant="text"
             aria-label={`Insert a row above row ${index + 1}`}

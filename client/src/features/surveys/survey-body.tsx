@@ -13,7 +13,7 @@ interface SurveyBodyProps {
   told: string | null
 }
 
-const columns = { xs: '100%', lg: 'minmax(0, 2fr) minmax(280px, 1fr)' }
+const columns = { xs: '100%', lg: 'minmax(0, 5fr) minmax(280px, 2fr)' }
 
 export function SurveyBody({ draft, isLocked, told }: SurveyBodyProps) {
   const soFar = useMemo(() => reduceSoFar(readSurvey(draft)), [draft])

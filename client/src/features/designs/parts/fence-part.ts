@@ -35,6 +35,7 @@ export const fencePart: PartSpec = {
         {
           kind: 'list',
           name: 'gates',
+          isCompact: true,
           title: 'Gates',
           one: 'gate',
           empty: {},

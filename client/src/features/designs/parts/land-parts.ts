@@ -9,6 +9,7 @@ export const pondPart: PartSpec = {
     {
       kind: 'list',
       name: 'stages',
+      isCompact: true,
       title: 'Area by level',
       one: 'level',
       hint: 'From the lowest up',

@@ -27,6 +27,7 @@ export const runoffPart: PartSpec = {
         {
           kind: 'list',
           name: 'intensities',
+          isCompact: true,
           title: 'Intensity of rain by duration',
           one: 'duration',
           hint: 'Of one return period, the shortest first',

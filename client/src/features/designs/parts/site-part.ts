@@ -33,7 +33,7 @@ export const sitePart: PartSpec = {
       one: 'point',
       hint: 'Three points or more, walked one way round. The middle of the ramp at station 0+00 is 0 east, 0 north.',
       empty: {},
-      column: 120,
+      isCompact: true,
       isOrdered: true,
       items: [number('eastFt', 'East', 'ft'), number('northFt', 'North', 'ft')],
     },
