@@ -34,6 +34,21 @@ export function Timeline({ events }: TimelineProps) {
   )
 }
 
+function FoldedLines({ events }: { events: readonly EventView[] }) {
+  return (
+    <details>
+      <summary>Each page</summary>
+      <Box component="ul" sx={{ m: 0, pl: 4 }}>
+        {events.map(({ sequence, sentence, rowHash }) => (
+          <li key={sequence}>
+            {sentence} <span title={rowHash}>{rowHash.slice(0, HASH_SHOWN)}</span>
+          </li>
+        ))}
+      </Box>
+    </details>
+  )
+}
+
 const HASH_SHOWN = 8
 
 function TimelineLine({ event }: { event: TimedEvent }) {
@@ -53,8 +68,9 @@ function TimelineLine({ event }: { event: TimedEvent }) {
       <Box component="time" dateTime={event.at} className="figure" sx={muted}>
         {event.time}
       </Box>
-      <Typography sx={{ gridColumn: { xs: '1 / -1', sm: 2 }, gridRow: { xs: 2, sm: 1 } }}>
+      <Typography component="div" sx={{ gridColumn: { xs: '1 / -1', sm: 2 }, gridRow: { xs: 2, sm: 1 } }}>
         {event.sentence}
+        {event.folded.length > 0 && <FoldedLines events={event.folded} />}
       </Typography>
       <Typography
         variant="body2"
