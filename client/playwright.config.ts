@@ -1,11 +1,6 @@
-import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { defineConfig } from '@playwright/test'
-
-const runFolder = process.env.RUN_FOLDER ?? join(import.meta.dirname, '..', '.run')
-
-/** The running Wadestone: given by `npm test`, else the one that `npm start` runs here. */
-const address = process.env.WADESTONE_ADDRESS ?? readFileSync(join(runFolder, 'address'), 'utf8')
+import { address, runFolder } from './e2e/support/address'
 
 export default defineConfig({
   testDir: 'e2e',

@@ -22,7 +22,12 @@ beforeAll(async () => {
   district = await makeReadyDistrict(app, 'Sable Basin District (example)')
   walk = new Walk(app, district)
   const { districtId, planner } = district
-  const limits = { maximumHead: 74, maximumDrainageAcres: 5, maximumFillHeightFt: 6, maximumCost: '20000.00' as Money }
+  const limits = {
+    maximumHead: 74,
+    maximumDrainageAcres: 5,
+    maximumFillHeightFt: 6,
+    maximumCost: '20000.00' as Money,
+  }
   narrow = await addMember(app, districtId, { name: 'Edda Rowe', roles: ['planner'], limits })
   secondSupervisor = await addMember(app, districtId, { name: 'Jon Abelard', roles: ['supervisor'] })
   // The hardest case: a designer who may approve, but for having designed.
@@ -128,6 +133,11 @@ describe('a job with its landowner', () => {
   let walked: Walked
   let packet: PacketView
   let landowner: ApiClient
+  async function changeDesign(plan: object): Promise<void> {
+    const { api } = district.planner
+    const { id, name, version } = (await api.get(`/designs/${walked.designId}`)).body
+    await api.put(`/designs/${id}`, { name, plan }, { version }).expect(200)
+  }
   const sign = (change: object = {}) => walk.act(landowner, walked, { ...signature(packet), ...change })
   beforeAll(async () => {
     walked = await walk.draft('signer@farms.example')
@@ -185,7 +195,8 @@ describe('a job with its landowner', () => {
       checker.api.act(`/packets/${packet.id}/technical-check`),
       walk.act(supervisor.api, walked, { action: 'approve', packetSha256: packet.sha256 }),
     ]
-    for (const answer of tries) expect(await reasonsOf(answer)).toEqual([expect.stringContaining('with landowner')])
+    for (const answer of tries)
+      expect(await reasonsOf(answer)).toEqual([expect.stringContaining('with landowner')])
   })
 
   it('is signed once', async () => {
@@ -212,10 +223,15 @@ describe('a job with its landowner', () => {
   it('that came back needs a new packet once its design is changed', async () => {
     await walk.settleNotes(walked)
     const { api } = district.planner
-    const { body: design } = await api.get(`/designs/${walked.designId}`)
-    const plan = { ...design.plan, ramp: { ...design.plan.ramp, widthFt: 16 } }
-    await api.put(`/designs/${design.id}`, { name: design.name, plan }, { version: design.version }).expect(200)
+    const { plan } = readExample('north-pond').job
+    await changeDesign({ ...plan, ramp: { ...plan.ramp, widthFt: 16 } })
     expect((await walk.read(walked.job.id)).packetId).toBeNull()
+    expect(await reasonsOf(walk.act(api, walked, send))).toEqual([
+      words.noPacket,
+      words.notChecked,
+      '1 criteria check fails without a variance.',
+    ])
+    await changeDesign({ ...plan, berm: { ...plan.berm, pastLeftFt: 50 } })
     expect(await reasonsOf(walk.act(api, walked, send))).toEqual([words.noPacket, words.notChecked])
     const old = district.checker.api.act(`/packets/${packet.id}/technical-check`)
     expect((await reasonsOf(old))[0]).toContain('not the packet of the design as it stands')

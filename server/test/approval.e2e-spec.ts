@@ -137,7 +137,11 @@ describe('a signed job', () => {
     await withdraw(district.planner.api, 'One reason.').expect(200)
     expectProblem(await withdraw(district.planner.api, 'Another reason.'), 'idempotency-key-reused')
     expectProblem(
-      await district.planner.api.act(`/jobs/${walked.job.id}/acts`, { action: 'withdraw', reason: 'One reason.' }, key),
+      await district.planner.api.act(
+        `/jobs/${walked.job.id}/acts`,
+        { action: 'withdraw', reason: 'One reason.' },
+        key,
+      ),
       'idempotency-key-reused',
     )
     expect((await reasonsOf(withdraw(district.checker.api, 'One reason.')))[0]).toContain('withdrawn')
@@ -160,9 +164,7 @@ describe('a job that a supervisor returned', () => {
     const { packet, landowner } = await walk.withLandowner(walked)
     await walk.sign(walked, { packet, landowner })
     const notes = ['Longer berm.', 'Wider gate.']
-    const { body } = await walk
-      .act(district.supervisor.api, walked, { action: 'return', notes })
-      .expect(200)
+    const { body } = await walk.act(district.supervisor.api, walked, { action: 'return', notes }).expect(200)
     expect([body.state, body.openNotes]).toEqual(['returned', 2])
     expect(body.revisions[0].signatures).toEqual([expect.objectContaining({ isVoid: true })])
     await walk.settleNotes(walked)

@@ -83,7 +83,9 @@ describe('the record of a whole job', () => {
     ])
     expect(events.map(({ sequence }) => sequence)).toEqual(events.map((_, index) => index + 1))
     expect(events.find(({ kind }) => kind === 'approve')?.sentence).toBe('Tomas Quill approved revision 3.')
-    expect(events.find(({ kind }) => kind === 'return')?.sentence).toBe('Tomas Quill returned revision 2 with 1 note.')
+    expect(events.find(({ kind }) => kind === 'return')?.sentence).toBe(
+      'Tomas Quill returned revision 2 with 1 note.',
+    )
     for (const { sentence } of events) expect(sentence).toMatch(/^[A-Z].*\.$/)
   })
 
@@ -106,7 +108,9 @@ describe('the record of a whole job', () => {
     ]
     const all = JSON.stringify(await stored())
     for (const word of words) expect(all).not.toContain(word)
-    const texts = (await stored()).flatMap(({ facts }) => Object.values(facts).flat()).filter((fact) => typeof fact === 'string')
+    const texts = (await stored())
+      .flatMap(({ facts }) => Object.values(facts).flat())
+      .filter((fact) => typeof fact === 'string')
     expect(texts.filter((text) => !/^[\w-]{1,64}$/.test(text))).toEqual([])
     expect(texts.length).toBeGreaterThan(50)
   })

@@ -76,7 +76,10 @@ describe('a message', () => {
     await drainAgain(app)
     expect(app.mail.mails).toEqual([])
     const events = (await district.planner.api.get(`/jobs/${walked.job.id}/events`)).body
-    expect(events.at(-1)).toMatchObject({ kind: 'mail-failed', sentence: 'A message could not be delivered.' })
+    expect(events.at(-1)).toMatchObject({
+      kind: 'mail-failed',
+      sentence: 'A message could not be delivered.',
+    })
   })
 })
 
@@ -89,7 +92,9 @@ describe('a message nobody ever takes', () => {
     app.mail.refusals = Array.from({ length: 20 }, () => 451)
     for (let attempt = 1; attempt <= 14; attempt++) await drainAgain(app)
     const { body } = await district.office.api.get(`/jobs/${next.job.id}/mail`).expect(200)
-    expect(body).toEqual([expect.objectContaining({ status: 'failed', attempts: 12, lastError: `451 ${refusal}` })])
+    expect(body).toEqual([
+      expect.objectContaining({ status: 'failed', attempts: 12, lastError: `451 ${refusal}` }),
+    ])
     expect(await waitingTasks(app)).toBe(0)
   })
 })
@@ -125,7 +130,9 @@ describe('a link or code in a message', () => {
       const found = await owner.query(`select 1 from ${table} t where position($1 in t::text) > 0`, [token])
       expect([table, found]).toEqual([table, []])
     }
-    const codes = await owner.query(`select code_hash from entry_codes where code_hash like $1`, [`%${code}%`])
+    const codes = await owner.query(`select code_hash from entry_codes where code_hash like $1`, [
+      `%${code}%`,
+    ])
     expect(codes).toEqual([])
   })
 

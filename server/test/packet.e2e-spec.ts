@@ -1,5 +1,13 @@
 import { createHash } from 'node:crypto'
-import { moneyText, numberText, readyValue, type DesignView, type EventView, type JobView, type PacketView } from 'shared'
+import {
+  moneyText,
+  numberText,
+  readyValue,
+  type DesignView,
+  type EventView,
+  type JobView,
+  type PacketView,
+} from 'shared'
 import { PacketRendererService } from '../src/packets/packet-renderer.service'
 import { expectProblem } from './support/expect-problem'
 import { pageTexts, qpdfCheck } from './packets/pdf-tools'
@@ -55,7 +63,12 @@ describe('packet A', () => {
   })
 
   it('is stored byte for byte under the hash and size that are shown', async () => {
-    expect(packetA).toMatchObject({ kind: 'A', revision: 1, sha256: sha256(bytesOfA), sizeBytes: bytesOfA.length })
+    expect(packetA).toMatchObject({
+      kind: 'A',
+      revision: 1,
+      sha256: sha256(bytesOfA),
+      sizeBytes: bytesOfA.length,
+    })
     const answer = await district.planner.api.get(`/packets/${packetA.id}/file`)
     expect(answer.headers).toMatchObject({
       'content-type': 'application/pdf',

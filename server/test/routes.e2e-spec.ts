@@ -77,7 +77,8 @@ async function callerOfRoute(role: Role, { method }: Route): Promise<{ api: ApiC
   return { api, ids: { ...job.ids, session: sessionId } }
 }
 
-const pathFor = ({ name, path }: Route, ids: Ids): string => path.replace(':id', ids[routeSamples[name]?.id ?? 'job'])
+const pathFor = ({ name, path }: Route, ids: Ids): string =>
+  path.replace(':id', ids[routeSamples[name]?.id ?? 'job'])
 
 const mayCall = ({ access }: Route, role: Role): boolean =>
   access === 'public' ||
@@ -102,7 +103,8 @@ function callFully(api: ApiClient, route: Route, path: string) {
 }
 
 /** Refused for the role alone. A rule of the thing itself, such as of a note's author, says its reasons. */
-const isForbidden = ({ status, text }: Response): boolean => status === 403 && !('reasons' in JSON.parse(text))
+const isForbidden = ({ status, text }: Response): boolean =>
+  status === 403 && !('reasons' in JSON.parse(text))
 
 describe('every route', () => {
   it('says who may call it, and says what is written down for it here', () => {

@@ -97,7 +97,9 @@ describe('row security', () => {
   })
 
   it('ends with the transaction, so that the next one on the same connection sees nothing', async () => {
-    await Promise.all(Array.from({ length: 20 }, () => inOwn((manager) => manager.query('select 1 from jobs'))))
+    await Promise.all(
+      Array.from({ length: 20 }, () => inOwn((manager) => manager.query('select 1 from jobs'))),
+    )
     const answers = await Promise.all(Array.from({ length: 20 }, () => server.query('select id from jobs')))
     expect(answers.flat()).toEqual([])
   })
@@ -141,14 +143,17 @@ describe('the role of the server', () => {
 })
 
 describe('what is written once', () => {
-  it.each(['events', 'files', 'revisions'])('the owner cannot change, delete or empty in %s either', async (table) => {
-    const asOwner = (statement: string) =>
-      asOwnerIn(app.database.owner, own.districtId, (manager) => manager.query(statement))
-    const words = `rows of ${table} are written once`
-    await expect(asOwner(`update ${table} set district_id = district_id`)).rejects.toThrow(words)
-    await expect(asOwner(`delete from ${table}`)).rejects.toThrow(words)
-    await expect(asOwner(`truncate ${table} cascade`)).rejects.toThrow(words)
-  })
+  it.each(['events', 'files', 'revisions'])(
+    'the owner cannot change, delete or empty in %s either',
+    async (table) => {
+      const asOwner = (statement: string) =>
+        asOwnerIn(app.database.owner, own.districtId, (manager) => manager.query(statement))
+      const words = `rows of ${table} are written once`
+      await expect(asOwner(`update ${table} set district_id = district_id`)).rejects.toThrow(words)
+      await expect(asOwner(`delete from ${table}`)).rejects.toThrow(words)
+      await expect(asOwner(`truncate ${table} cascade`)).rejects.toThrow(words)
+    },
+  )
 })
 
 describe('the migrations', () => {

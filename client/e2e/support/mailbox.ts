@@ -1,7 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { simpleParser, type ParsedMail } from 'mailparser'
-import { runFolder } from './sign-ins.js'
+import { runFolder } from './address'
 
 const folder = join(runFolder, 'mail')
 const names = () =>

@@ -32,5 +32,7 @@ export async function giveRoles(
   districtId: string,
   { personId, roles }: { personId: string; roles: Role[] },
 ): Promise<void> {
-  await app.inDistrict(districtId, ({ manager }) => manager.update(Membership, { districtId, personId }, { roles }))
+  await app.inDistrict(districtId, ({ manager }) =>
+    manager.update(Membership, { districtId, personId }, { roles }),
+  )
 }

@@ -55,7 +55,9 @@ export function servedRoutes({ nest }: TestApp): string[] {
   const express: Express = nest.getHttpAdapter().getInstance()
   const layers = express.router.stack as Layer[]
   return layers
-    .flatMap(({ route }) => (route ? Object.keys(route.methods).map((verb) => ({ verb, path: route.path })) : []))
+    .flatMap(({ route }) =>
+      route ? Object.keys(route.methods).map((verb) => ({ verb, path: route.path })) : [],
+    )
     .map(({ verb, path }) => `${verb.toUpperCase()} ${path.replace(/^\/api/, '')}`)
     .sort((one, other) => one.localeCompare(other))
 }

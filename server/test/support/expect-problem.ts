@@ -2,7 +2,8 @@ import { problemCatalogue, type ProblemDocument, type ProblemSlug } from 'shared
 import type { Response } from 'supertest'
 
 /** What only our own code, the framework or the database would say. */
-const inside = /\bat \S+ \(|node_modules|\.[jt]s:\d+|QueryFailed|\b(select|insert into|update|delete from) \w+ |relation "/i
+const inside =
+  /\bat \S+ \(|node_modules|\.[jt]s:\d+|QueryFailed|\b(select|insert into|update|delete from) \w+ |relation "/i
 
 /** The answer is this very problem, as RFC 9457 writes it, and tells nothing of the server's inside. */
 export function expectProblem(response: Response, slug: ProblemSlug): ProblemDocument {

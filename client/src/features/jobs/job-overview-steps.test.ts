@@ -8,7 +8,11 @@ const job = (more: Partial<JobView>) =>
 const design = (verdicts: string[]) =>
   ({
     name: 'Flat',
-    result: { quantities: { ok: true }, funding: { ok: true }, checks: verdicts.map((verdict) => ({ verdict })) },
+    result: {
+      quantities: { ok: true },
+      funding: { ok: true },
+      checks: verdicts.map((verdict) => ({ verdict })),
+    },
   }) as unknown as DesignView
 
 const packet = (more: Partial<PacketView>) => ({ revision: 2, technicalCheck: null, ...more }) as PacketView
@@ -38,7 +42,10 @@ describe('the steps of the overview', () => {
     expect(steps({ status: 'making' })).toMatchObject({ Packet: 'waiting', 'Technical check': 'waiting' })
     expect(steps({ status: 'failed' })).toMatchObject({ Packet: 'fail' })
     const technicalCheck = { by: 'Ada', at: '2026-05-14T20:04:00Z', note: null, withinLimits: true }
-    expect(steps({ status: 'ready', technicalCheck })).toMatchObject({ Packet: 'pass', 'Technical check': 'pass' })
+    expect(steps({ status: 'ready', technicalCheck })).toMatchObject({
+      Packet: 'pass',
+      'Technical check': 'pass',
+    })
   })
 
   it('show open notes as something to look at', () => {

@@ -91,13 +91,17 @@ export const GridLine = memo(function GridLine(props: GridLineProps) {
   )
 }, isSameLine)
 
-/** Figures that follow are new words at every key pressed; only where they differ is a row drawn again. */
+/**
+ * The form hands out new copies of all rows at every key pressed, and figures that follow are new words each time: a
+ * row is drawn again only where a cell or a figure reads otherwise.
+ */
 function isSameLine(before: GridLineProps, after: GridLineProps): boolean {
-  const { derived: figuresBefore, ...restBefore } = before
-  const { derived: figuresAfter, ...restAfter } = after
+  const { derived: figuresBefore, row: rowBefore, ...restBefore } = before
+  const { derived: figuresAfter, row: rowAfter, ...restAfter } = after
   const keys = Object.keys(restAfter) as (keyof typeof restAfter)[]
   return (
     keys.every((key) => Object.is(restBefore[key], restAfter[key])) &&
+    after.columns.every(({ key }) => rowBefore[key] === rowAfter[key]) &&
     figuresBefore.join('\n') === figuresAfter.join('\n')
   )
 }

@@ -6,6 +6,7 @@ import {
   type ExecutionContext,
 } from '@nestjs/common'
 import { FileInterceptor } from '@nestjs/platform-express'
+import { memoryStorage } from 'multer'
 import { Problem } from 'shared'
 
 export const uploadKey = 'wadestone:upload'
@@ -15,7 +16,7 @@ const limits = { fileSize: 2 * megabyte, files: 1, fields: 0, parts: 1 }
 
 /** A route that takes one file in the field `file` instead of JSON. */
 export const Upload = (): MethodDecorator =>
-  applyDecorators(SetMetadata(uploadKey, true), UseInterceptors(FileInterceptor('file', { limits })))
+  applyDecorators(SetMetadata(uploadKey, true), UseInterceptors(FileInterceptor('file', { storage: memoryStorage(), limits })))
 
 export const UploadedBytes = createParamDecorator((_: unknown, context: ExecutionContext): Buffer => {
   const { file } = context.switchToHttp().getRequest<{ file?: { buffer: Buffer; size: number } }>()
