@@ -1,6 +1,7 @@
 import { join } from 'node:path'
 import { defineConfig } from '@playwright/test'
-import { address, runFolder } from './e2e/support/address'
+import { address } from './e2e/support/address'
+import { runFolder } from './e2e/support/sign-ins'
 
 export default defineConfig({
   testDir: 'e2e',

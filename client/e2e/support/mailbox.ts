@@ -1,7 +1,7 @@
 import { readdirSync, readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import { simpleParser, type ParsedMail } from 'mailparser'
-import { runFolder } from './address'
+import { runFolder } from './sign-ins'
 
 const folder = join(runFolder, 'mail')
 const names = () =>

@@ -1,7 +1,6 @@
 import { readFileSync } from 'node:fs'
 import { join } from 'node:path'
 import type { Role } from 'shared'
-import { runFolder } from './address'
 
 export interface SignIn {
   district: string
@@ -10,6 +9,8 @@ export interface SignIn {
   email: string
   password: string
 }
+
+export const runFolder = process.env.RUN_FOLDER ?? join(import.meta.dirname, '..', '..', '..', '.run')
 
 const all = JSON.parse(readFileSync(join(runFolder, 'demo-sign-ins.json'), 'utf8')) as SignIn[]
 

@@ -21,10 +21,13 @@ interface RuledTableProps {
   children: ReactNode
 }
 
-/** A table ruled like a field book. Where it is wider than the screen it scrolls by itself, also by keyboard. */
+/**
+ * A table ruled like a field book. Where it is wider than the screen it scrolls by itself, also by keyboard. It is
+ * positioned, so that words hidden for the eye stay inside and do not widen the page.
+ */
 export function RuledTable({ caption, columns, minWidth, children }: RuledTableProps) {
   return (
-    <Box role="region" aria-label={caption} tabIndex={0} sx={{ overflowX: 'auto' }}>
+    <Box role="region" aria-label={caption} tabIndex={0} sx={{ overflowX: 'auto', position: 'relative' }}>
       <Table sx={{ minWidth }}>
         <caption className="visually-hidden">{caption}</caption>
         <TableHead>

@@ -6,7 +6,7 @@ import { useSaveDesign } from '../../api/designs'
 import { Form } from '../../components/fields/form'
 import { SubmitButton } from '../../components/fields/submit-button'
 import { TextField } from '../../components/fields/text-field'
-import { useSchemaForm } from '../../components/fields/use-schema-form'
+import { useFilledForm } from '../../components/fields/use-filled-form'
 
 const renameSchema = z.strictObject({ newName: designInputSchema.shape.name })
 
@@ -17,7 +17,7 @@ interface RenameDesignFormProps {
 
 export function RenameDesignForm({ design, onDone }: RenameDesignFormProps) {
   const save = useSaveDesign(design.jobId, design.id)
-  const form = useSchemaForm(renameSchema, { newName: design.name })
+  const { form } = useFilledForm(renameSchema, { newName: design.name })
   return (
     <Form
       form={form}
