@@ -16,7 +16,10 @@ const limits = { fileSize: 2 * megabyte, files: 1, fields: 0, parts: 1 }
 
 /** A route that takes one file in the field `file` instead of JSON. */
 export const Upload = (): MethodDecorator =>
-  applyDecorators(SetMetadata(uploadKey, true), UseInterceptors(FileInterceptor('file', { storage: memoryStorage(), limits })))
+  applyDecorators(
+    SetMetadata(uploadKey, true),
+    UseInterceptors(FileInterceptor('file', { storage: memoryStorage(), limits })),
+  )
 
 export const UploadedBytes = createParamDecorator((_: unknown, context: ExecutionContext): Buffer => {
   const { file } = context.switchToHttp().getRequest<{ file?: { buffer: Buffer; size: number } }>()
