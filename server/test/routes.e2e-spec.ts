@@ -54,6 +54,7 @@ async function sentJob(district: ReadyDistrict, email: string): Promise<SentJob>
     criteriaSet: (await app.nest.get(CriteriaSetsService, { strict: false }).create(tx, draftCriteria)).id,
     costList: (await app.nest.get(CostListsService, { strict: false }).create(tx, draftCosts)).id,
   }))
+  const [message] = (await district.office.api.get(`/jobs/${walked.job.id}/mail`).expect(200)).body
   const { body } = await landowner.get('/session')
   const ids: Ids = {
     ...drafts,
@@ -62,6 +63,7 @@ async function sentJob(district: ReadyDistrict, email: string): Promise<SentJob>
     producer: walked.producer.id,
     packet: packet.id,
     note: note.body.id,
+    mail: message.id,
     session: body.sessionId,
   }
   return { walked, ids, landowner: { api: landowner, personId: body.personId } }
@@ -78,7 +80,7 @@ async function callerOfRoute(role: Role, { method }: Route): Promise<{ api: ApiC
 }
 
 const pathFor = ({ name, path }: Route, ids: Ids): string =>
-  path.replace(':id', ids[routeSamples[name]?.id ?? 'job'])
+  path.replace(':mailId', ids.mail).replace(':id', ids[routeSamples[name]?.id ?? 'job'])
 
 const mayCall = ({ access }: Route, role: Role): boolean =>
   access === 'public' ||

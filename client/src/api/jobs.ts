@@ -54,6 +54,25 @@ export const mailQuery = (id: string) =>
     refetchInterval: (query) => (query.state.data?.some((mail) => mail.status === 'waiting') ? 2000 : false),
   })
 
+function useMailAgain<Asked>(jobId: string, path: (asked: Asked) => string) {
+  const intention = useIntention()
+  const queries = useQueryClient()
+  return useMutation({
+    mutationFn: (asked: Asked) =>
+      intention.run({ path: path(asked) }, (idempotencyKey) =>
+        request<MailView[]>(`/jobs/${jobId}${path(asked)}`, { method: 'POST', body: {}, idempotencyKey }),
+      ),
+    onSuccess: (mail) => queries.setQueryData(jobKeys.mail(jobId), mail),
+  })
+}
+
+/** A failed message once more. */
+export const useSendMailAgain = (jobId: string) =>
+  useMailAgain<string>(jobId, (mailId) => `/mail/${mailId}/send-again`)
+
+/** A new link to each signer; the earlier ones end. */
+export const useSendLinksAgain = (jobId: string) => useMailAgain<void>(jobId, () => '/links')
+
 /** A change of one job touches its page, its lists and what waits on desks. */
 export function useJobRefresh() {
   const queries = useQueryClient()

@@ -39,6 +39,19 @@ export function useMakePacket(jobId: string) {
   })
 }
 
+/** A packet that could not be made, once more. */
+export function useMakePacketAgain(packetId: string) {
+  const intention = useIntention()
+  const onSuccess = useStorePacket()
+  return useMutation({
+    mutationFn: () =>
+      intention.run({ packetId }, (idempotencyKey) =>
+        request<PacketView>(`/packets/${packetId}/make-again`, { method: 'POST', body: {}, idempotencyKey }),
+      ),
+    onSuccess,
+  })
+}
+
 export function useTechnicalCheck(packetId: string) {
   const intention = useIntention()
   const onSuccess = useStorePacket()

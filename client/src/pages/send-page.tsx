@@ -10,6 +10,7 @@ import { Page } from '../components/layout/page'
 import { Section } from '../components/layout/section'
 import { Addressees } from '../features/mail/addressees'
 import { MailList } from '../features/mail/mail-list'
+import { SendLinksAgain } from '../features/mail/send-links-again'
 import { SendPacketForm } from '../features/mail/send-packet-form'
 import { PacketFacts } from '../features/packets/packet-facts'
 import { PacketState } from '../features/packets/packet-state'
@@ -20,7 +21,14 @@ export function SendPage() {
   const query = useQuery(jobQuery(jobId))
   return (
     <Page title="Send" maxWidth={960}>
-      <QueryGate query={query}>{(job) => <FinalPacket job={job} />}</QueryGate>
+      <QueryGate query={query}>
+        {(job) => (
+          <>
+            <FinalPacket job={job} />
+            <SendLinksAgain job={job} />
+          </>
+        )}
+      </QueryGate>
       {may('mail:read') && <MailOfJob jobId={jobId} />}
     </Page>
   )
@@ -60,7 +68,7 @@ function MailOfJob({ jobId }: { jobId: string }) {
   const query = useQuery(mailQuery(jobId))
   return (
     <Section title="Mail of this job">
-      <QueryGate query={query}>{(mail) => <MailList mail={mail} />}</QueryGate>
+      <QueryGate query={query}>{(mail) => <MailList jobId={jobId} mail={mail} />}</QueryGate>
     </Section>
   )
 }

@@ -61,6 +61,8 @@ const otherSentences = {
   'note-written': (e) => `${e.who} wrote a note.`,
   'note-answered': (e) => `${e.who} answered a note.`,
   'note-settled': (e) => `${e.who} settled a note.`,
+  'mail-again': (e) => `${e.who} put a message in the post again.`,
+  'link-again': (e) => `${e.who} sent the link to the landowner again.`,
   'mail-sent': () => 'A message went out.',
   'mail-failed': () => 'A message could not be delivered.',
 } as const satisfies Record<string, Sentence>

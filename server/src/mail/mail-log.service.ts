@@ -11,7 +11,7 @@ interface MailRow extends Omit<MailView, 'queuedAt' | 'sentAt' | 'attachment'> {
 
 const mailQuery = `
   select m.id, m.kind, m.to_address as "to", m.subject, m.message_id as "messageId", m.status, m.attempts,
-    m.queued_at as "queuedAt", m.sent_at as "sentAt", m.last_error as "lastError",
+    m.queued_at as "queuedAt", m.sent_at as "sentAt", m.last_error as "lastError", m.is_secret as "isSecret",
     m.attachment_name as "attachmentName", f.sha256 as "attachmentSha256"
   from mail_messages m
   left join files f on f.district_id = m.district_id and f.id = m.attachment_file_id

@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common'
 import { randomUUID } from 'node:crypto'
-import { emailSchema, lineOfText } from 'shared'
+import { emailSchema, lineOfText, Problem } from 'shared'
 import { District } from '../districts/district.entity.js'
 import { Config } from '../platform/config/config.js'
 import type { Tx } from '../platform/database/tx.js'
@@ -61,10 +61,36 @@ export class MailService {
       queuedBy: tx.personId,
     })
     await tx.manager.insert(MailMessage, message)
-    const payload: SendMailPayload = { districtId: tx.districtId, mailId: id }
-    await this.queue.add(tx, sendMailTask, payload, { maxAttempts: mostTries })
+    await this.enqueue(tx, id)
     return message
   }
+
+  /**
+   * Puts a failed message in the post once more, under its old Message-ID.
+   *
+   * @throws Problem not-found, or transition-not-allowed for one that did not fail or whose text is gone.
+   */
+  async postAgain(tx: Tx, { jobId, mailId }: { jobId: string; mailId: string }): Promise<void> {
+    const message = await tx.manager.findOne(MailMessage, {
+      where: { districtId: tx.districtId, id: mailId, jobId },
+      lock: { mode: 'pessimistic_write' },
+    })
+    if (message === null) throw new Problem('not-found')
+    const reason = refusalToRepeat(message)
+    if (reason !== null) throw new Problem('transition-not-allowed', { detail: reason, reasons: [reason] })
+    await tx.manager.update(MailMessage, { districtId: tx.districtId, id: mailId }, { status: 'waiting' })
+    await this.enqueue(tx, mailId)
+  }
+
+  private async enqueue(tx: Tx, mailId: string): Promise<void> {
+    const payload: SendMailPayload = { districtId: tx.districtId, mailId }
+    await this.queue.add(tx, sendMailTask, payload, { maxAttempts: mostTries })
+  }
+}
+
+function refusalToRepeat({ status, text }: MailMessage): string | null {
+  if (status !== 'failed') return 'Only a message that failed can be sent again.'
+  return text === null ? 'The way in that this message carried is gone. Send the link again instead.' : null
 }
 
 async function districtName({ manager, districtId }: Tx): Promise<string> {

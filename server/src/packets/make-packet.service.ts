@@ -1,6 +1,6 @@
 import { Injectable } from '@nestjs/common'
 import { randomUUID } from 'node:crypto'
-import type { PacketView } from 'shared'
+import { Problem, type PacketView } from 'shared'
 import { FreezeDesignService } from '../designs/freeze-design.service.js'
 import { JobAccessService, type Asking } from '../jobs/job-access.service.js'
 import { JobsService } from '../jobs/jobs.service.js'
@@ -8,6 +8,7 @@ import type { Tx } from '../platform/database/tx.js'
 import { EventLog } from '../platform/events/event-log.service.js'
 import { Queue } from '../platform/queue/queue.service.js'
 import { SignaturesService } from '../signatures/signatures.service.js'
+import { PacketAccessService } from './packet-access.service.js'
 import { Packet } from './packet.entity.js'
 import { renderPacketTask, type RenderPacketPayload } from './render-packet-task.js'
 
@@ -26,6 +27,7 @@ const mostTries = 4
 export class MakePacketService {
   constructor(
     private readonly access: JobAccessService,
+    private readonly packets: PacketAccessService,
     private readonly jobs: JobsService,
     private readonly designs: FreezeDesignService,
     private readonly signatures: SignaturesService,
@@ -59,6 +61,29 @@ export class MakePacketService {
     return this.open(tx, { jobId: packetA.jobId, revisionId: packetA.revisionId, revision, kind: 'B' })
   }
 
+  /**
+   * Draws a packet that could not be made once more. It stays the same packet, of the same revision.
+   *
+   * @throws Problem transition-not-allowed unless it failed.
+   */
+  async makeAgain(tx: Tx, asking: Asking, packetId: string): Promise<Packet> {
+    const wanted = { permission: 'packet:make-again', packetId, lock: 'to-change' } as const
+    const { packet } = await this.packets.find(tx, asking, wanted)
+    if (packet.status !== 'failed') {
+      const reason = 'Only a packet that could not be made is made again.'
+      throw new Problem('transition-not-allowed', { detail: reason, reasons: [reason] })
+    }
+    const change = { status: 'waiting' as const, failure: null, requestedAt: tx.at }
+    await tx.manager.update(Packet, { districtId: tx.districtId, id: packet.id }, change)
+    await this.enqueue(tx, packet.id)
+    return Object.assign(packet, change)
+  }
+
+  private async enqueue(tx: Tx, packetId: string): Promise<void> {
+    const payload: RenderPacketPayload = { districtId: tx.districtId, packetId }
+    await this.queue.add(tx, renderPacketTask, payload, { maxAttempts: mostTries })
+  }
+
   private async open(tx: Tx, { jobId, revisionId, revision, kind }: PacketToMake): Promise<Packet> {
     const packet = tx.manager.create(Packet, {
       districtId: tx.districtId,
@@ -81,8 +106,7 @@ export class MakePacketService {
     await tx.manager.insert(Packet, packet)
     const facts = { packetId: packet.id, kind, revision }
     await this.events.append(tx, { streamId: jobId, kind: 'packet-asked', facts })
-    const payload: RenderPacketPayload = { districtId: tx.districtId, packetId: packet.id }
-    await this.queue.add(tx, renderPacketTask, payload, { maxAttempts: mostTries })
+    await this.enqueue(tx, packet.id)
     return packet
   }
 

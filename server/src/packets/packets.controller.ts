@@ -41,6 +41,20 @@ export class PacketsController {
     })
   }
 
+  @Post('packets/:id/make-again')
+  @HttpCode(202)
+  @Requires('packet:make-again')
+  makeAgain(
+    @WhoCalls() caller: Caller,
+    @Param('id', idParam) packetId: string,
+    @Intended() intention: Intention,
+  ): Promise<PacketView> {
+    return this.once.run(caller.actor, intention, async (tx) => {
+      const packet = await this.maker.makeAgain(tx, caller, packetId)
+      return this.views.viewOf(tx, packet)
+    })
+  }
+
   @Get('packets/:id')
   @Requires('packet:read')
   read(@WhoCalls() caller: Caller, @Param('id', idParam) packetId: string): Promise<PacketView> {

@@ -11,6 +11,8 @@ export interface Ids {
   schedule: string
   criteriaSet: string
   costList: string
+  /** A message of the job. */
+  mail: string
   session: string
 }
 
@@ -48,11 +50,14 @@ export const routeSamples: Readonly<Record<string, RouteSample>> = {
   'POST /jobs/:id/acts': { id: 'job', body: { action: 'withdraw', reason: 'Not mine.' }, hasKey: true },
   'POST /jobs/:id/calculate': { id: 'job', body: job.plan },
   'POST /jobs/:id/designs': { id: 'job', body: design },
+  'POST /jobs/:id/links': { id: 'job', hasKey: true },
+  'POST /jobs/:id/mail/:mailId/send-again': { id: 'job', hasKey: true },
   'POST /jobs/:id/notes': { id: 'job', body: { text: 'Not mine.' } },
   'POST /jobs/:id/packets': { id: 'job', body: { designId: crypto.randomUUID() }, hasKey: true },
   'POST /notes/:id/answer': { id: 'note', body: { text: 'Not mine.' } },
   'POST /notes/:id/settle': { id: 'note' },
   'POST /packets/:id/consent': { id: 'packet', body: { consentVersion: '2026-1', agrees: true } },
+  'POST /packets/:id/make-again': { id: 'packet', hasKey: true },
   'POST /packets/:id/read-pages': { id: 'packet', body: { page: 1 } },
   'POST /packets/:id/technical-check': { id: 'packet', body: {}, hasKey: true },
   'POST /schedules/:id/put-in-force': { id: 'schedule', hasKey: true },

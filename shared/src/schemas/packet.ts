@@ -97,5 +97,7 @@ export interface MailView {
   queuedAt: string
   sentAt: string | null
   lastError: string | null
+  /** It carried a way in, so its text is gone; a new link takes its place. */
+  isSecret: boolean
   attachment: { filename: string; sha256: string } | null
 }

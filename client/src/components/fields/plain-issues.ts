@@ -6,6 +6,7 @@ export interface PlainIssue {
 }
 
 type Issue = z.core.$ZodIssue
+type RawIssue = z.core.$ZodRawIssue
 
 const expectedSentences: Record<string, string> = {
   number: 'Give a number',
@@ -15,18 +16,25 @@ const expectedSentences: Record<string, string> = {
   array: 'Add at least one',
 }
 
-const counted = (origin: string, count: number | bigint, bound: string): string =>
-  origin === 'array' ? `Give ${bound} ${count} of them` : `Must be ${bound} ${count}`
+function counted(origin: string, count: number | bigint, bound: string): string {
+  if (origin === 'array') return `Give ${bound} ${count} of them`
+  return origin === 'string' ? `Give ${bound} ${count} characters` : `Must be ${bound} ${count}`
+}
+
+/** What a schema without a sentence of its own says; undefined where there is nothing plainer to say. */
+export function plainSentence(issue: RawIssue): string | undefined {
+  if (issue.code === 'invalid_type') return expectedSentences[issue.expected] ?? 'This is missing'
+  if (issue.code === 'invalid_value') return 'Choose one'
+  if (issue.code === 'too_small') return counted(issue.origin, issue.minimum, 'at least')
+  if (issue.code === 'too_big') return counted(issue.origin, issue.maximum, 'at most')
+  return undefined
+}
 
 /** What the schema library says by itself is written for programmers. Sentences of our own schemas are kept. */
 function sentenceOf(issue: Issue, isChoice: boolean): string {
   if (issue.code === 'unrecognized_keys' && isChoice) return 'Give one of the two, not both'
   if (!/^(Invalid|Too|Unrecognized)/.test(issue.message)) return issue.message
-  if (issue.code === 'invalid_type') return expectedSentences[issue.expected] ?? 'This is missing'
-  if (issue.code === 'invalid_value') return 'Choose one'
-  if (issue.code === 'too_small') return counted(issue.origin, issue.minimum, 'at least')
-  if (issue.code === 'too_big') return counted(issue.origin, issue.maximum, 'at most')
-  return issue.message
+  return plainSentence(issue as RawIssue) ?? issue.message
 }
 
 /** Of several shapes the one that was meant: nothing in it that it does not know, and the least amiss. */

@@ -74,11 +74,6 @@ export function RowList({ name, spec }: RowListProps) {
           <PartItems items={spec.items} under={`${name}.${index}`} column={spec.isCompact ? 150 : 184} />
         </Box>
       ))}
-      {typeof error === 'string' && (
-        <Typography variant="body2" sx={{ color: 'error.main', fontWeight: 600, mt: 2 }}>
-          {error}
-        </Typography>
-      )}
       <Box sx={{ display: 'flex', flexWrap: 'wrap', gap: 4, alignItems: 'center', mt: 2 }}>
         <Button onClick={() => append(structuredClone(spec.empty))}>Add a {spec.one}</Button>
         {takenOut && (
@@ -93,6 +88,12 @@ export function RowList({ name, spec }: RowListProps) {
           </Button>
         )}
       </Box>
+      {/* Under the button: it must not move away while it is pressed. */}
+      {typeof error === 'string' && (
+        <Typography variant="body2" sx={{ color: 'error.main', fontWeight: 600, mt: 2 }}>
+          {error}
+        </Typography>
+      )}
     </Box>
   )
 }

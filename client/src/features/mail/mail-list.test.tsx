@@ -1,3 +1,4 @@
+import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
 import { render, screen } from '@testing-library/react'
 import type { MailView, SessionView } from 'shared'
 import { describe, expect, it } from 'vitest'
@@ -5,7 +6,11 @@ import { SessionContext } from '../../api/session-context'
 import { addressText } from './addressees'
 import { MailList } from './mail-list'
 
-const session = { district: { timeZone: 'America/Chicago' } } as SessionView
+const session = {
+  personId: 'p1',
+  roles: ['office'],
+  district: { id: 'd1', timeZone: 'America/Chicago' },
+} as unknown as SessionView
 
 const mail = (id: string, rest: Partial<MailView>): MailView => ({
   id,
@@ -18,15 +23,18 @@ const mail = (id: string, rest: Partial<MailView>): MailView => ({
   queuedAt: `2026-05-2${id}T15:00:00.000Z`,
   sentAt: null,
   lastError: null,
+  isSecret: false,
   attachment: null,
   ...rest,
 })
 
 const show = (list: MailView[]) =>
   render(
-    <SessionContext value={session}>
-      <MailList mail={list} />
-    </SessionContext>,
+    <QueryClientProvider client={new QueryClient()}>
+      <SessionContext value={session}>
+        <MailList jobId="j1" mail={list} />
+      </SessionContext>
+    </QueryClientProvider>,
   )
 
 describe('the mail of a job', () => {
@@ -37,6 +45,18 @@ describe('the mail of a job', () => {
     expect(line).toHaveTextContent(
       'It could not be delivered; it was tried 3 times. The mail server said: 550 no such mailbox',
     )
+  })
+
+  it('offers a failed message again, unless it carried a way in or did not fail', () => {
+    show([
+      mail('1', { status: 'failed' }),
+      mail('2', { status: 'failed', isSecret: true }),
+      mail('3', { status: 'sent' }),
+    ])
+    const [sent, secret, failed] = screen.getAllByRole('listitem')
+    expect(failed).toHaveTextContent('Send it again')
+    expect(secret).not.toHaveTextContent('Send it again')
+    expect(sent).not.toHaveTextContent('Send it again')
   })
 
   it('says of a message that waits after a failed try that it will be tried again', () => {

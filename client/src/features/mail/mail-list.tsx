@@ -4,8 +4,10 @@ import type { MailView } from 'shared'
 import { VerdictMark } from '../../components/feedback/verdict-mark'
 import { Instant } from '../../components/layout/instant'
 import { mailSentence } from './mail-words'
+import { SendMailAgain } from './send-mail-again'
 
 interface MailListProps {
+  jobId: string
   mail: readonly MailView[]
 }
 
@@ -16,7 +18,7 @@ const marks = {
 } as const
 
 /** Every message of the job, newest first. */
-export function MailList({ mail }: MailListProps) {
+export function MailList({ jobId, mail }: MailListProps) {
   if (mail.length === 0) {
     return <Typography sx={{ py: 2, color: 'text.secondary' }}>No message of this job yet.</Typography>
   }
@@ -24,13 +26,13 @@ export function MailList({ mail }: MailListProps) {
   return (
     <Box component="ul" aria-live="polite" sx={{ listStyle: 'none', m: 0, p: 0 }}>
       {newestFirst.map((message) => (
-        <MailLine key={message.id} message={message} />
+        <MailLine key={message.id} jobId={jobId} message={message} />
       ))}
     </Box>
   )
 }
 
-function MailLine({ message }: { message: MailView }) {
+function MailLine({ jobId, message }: { jobId: string; message: MailView }) {
   const { status, to, subject, queuedAt, sentAt, attachment, messageId } = message
   const sentence = mailSentence(message)
   const muted = { color: 'text.secondary', overflowWrap: 'anywhere' }
@@ -56,6 +58,7 @@ function MailLine({ message }: { message: MailView }) {
         {sentence && (
           <Typography sx={{ color: 'error.main', overflowWrap: 'anywhere' }}>{sentence}</Typography>
         )}
+        <SendMailAgain jobId={jobId} message={message} />
         <Typography variant="body2" sx={muted}>
           Put in the post <Instant at={queuedAt} />
           {sentAt !== null && (

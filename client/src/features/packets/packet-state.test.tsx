@@ -1,19 +1,24 @@
 import { QueryClient, QueryClientProvider } from '@tanstack/react-query'
 import { render, screen } from '@testing-library/react'
 import { afterEach, describe, expect, it, vi } from 'vitest'
-import type { PacketView } from 'shared'
+import type { PacketView, SessionView } from 'shared'
+import { SessionContext } from '../../api/session-context'
 import { PacketState } from './packet-state'
 
 const packet = (change: Partial<PacketView>) => ({ id: 'k1', jobId: 'j1', kind: 'A', revision: 2, ...change })
 
 const answer = (body: unknown) => new Response(JSON.stringify(body), { status: 200 })
 
+const session = { personId: 'p1', roles: ['planner'], district: { id: 'd1' } } as unknown as SessionView
+
 const show = () =>
   render(
     <QueryClientProvider client={new QueryClient()}>
-      <PacketState packetId="k1" isJobBehind>
-        {({ revision }) => <p>Revision {revision} is here</p>}
-      </PacketState>
+      <SessionContext value={session}>
+        <PacketState packetId="k1" isJobBehind>
+          {({ revision }) => <p>Revision {revision} is here</p>}
+        </PacketState>
+      </SessionContext>
     </QueryClientProvider>,
   )
 
@@ -37,6 +42,7 @@ describe('a packet', () => {
       vi.fn().mockImplementation(async () => answer(packet({ status: 'failed' }))),
     )
     show()
-    expect(await screen.findByRole('alert')).toHaveTextContent(/revision 2 could not be made. Make it again/)
+    expect(await screen.findByRole('alert')).toHaveTextContent(/revision 2 could not be made/)
+    expect(screen.getByRole('button', { name: 'Make it again' })).toBeEnabled()
   })
 })

@@ -3,6 +3,10 @@ import LinearProgress from '@mui/material/LinearProgress'
 import Typography from '@mui/material/Typography'
 import type { ReactNode } from 'react'
 import type { PacketView } from 'shared'
+import { useMakePacketAgain } from '../../api/packets'
+import { useMay } from '../../api/session-context'
+import { ActButton } from '../../components/feedback/act-button'
+import { ProblemAlert } from '../../components/feedback/problem-alert'
 import { QueryGate } from '../../components/feedback/query-gate'
 import { VerdictMark } from '../../components/feedback/verdict-mark'
 import { usePacket } from './use-packet'
@@ -10,12 +14,6 @@ import { usePacket } from './use-packet'
 const progressWords = {
   waiting: 'It waits for its turn.',
   making: 'Drawings and pages are being made.',
-} as const
-
-/** What helps when it failed: only packet A can be asked for again. */
-const failureWords = {
-  A: 'Make it again. If it fails once more, tell an administrator the number of this job.',
-  B: 'Nothing was sent. Tell an administrator the number of this job.',
 } as const
 
 interface PacketStateProps {
@@ -54,12 +52,26 @@ function Progress({ revision, words }: { revision: number; words: string }) {
 }
 
 function Failure({ packet }: { packet: PacketView }) {
+  const again = useMakePacketAgain(packet.id)
+  const may = useMay()
   return (
     <Box role="alert" sx={{ my: 4, maxWidth: 560 }}>
       <VerdictMark kind="fail" words="not made" />
       <Typography>
-        The packet of revision {packet.revision} could not be made. {failureWords[packet.kind]}
+        The packet of revision {packet.revision} could not be made. If it fails once more, tell an
+        administrator the number of this job.
       </Typography>
+      {may('packet:make-again') && (
+        <Box sx={{ mt: 3 }}>
+          <ProblemAlert error={again.error} />
+          <ActButton
+            words="Make it again"
+            busyWords="Asking…"
+            isBusy={again.isPending}
+            onAct={() => again.mutate()}
+          />
+        </Box>
+      )}
     </Box>
   )
 }

@@ -1,18 +1,21 @@
 import { producerInputSchema, type ProducerView } from 'shared'
-import { z } from 'zod'
+import type { z } from 'zod'
 import { useAddProducer } from '../../api/people'
 import { CheckField } from '../../components/fields/check-field'
 import { FieldGrid } from '../../components/fields/field-grid'
 import { Form } from '../../components/fields/form'
+import { readSchema } from '../../components/fields/read-schema'
 import { SubmitButton } from '../../components/fields/submit-button'
 import { TextField } from '../../components/fields/text-field'
 import { useSchemaForm } from '../../components/fields/use-schema-form'
 import { useWatch } from 'react-hook-form'
 
-/** The tick only opens the address boxes; the server is sent an address or none. */
-const formSchema = z
-  .object({ ...producerInputSchema.shape, hasAddress: z.boolean() })
-  .transform(({ hasAddress, address, ...rest }) => (hasAddress ? { ...rest, address } : rest))
+type ProducerTyped = z.input<typeof producerInputSchema> & { hasAddress: boolean }
+
+/** The tick only opens the address boxes; the server is sent a whole address or none. */
+const formSchema = readSchema(producerInputSchema, ({ hasAddress, address, ...rest }: ProducerTyped) =>
+  hasAddress ? { ...rest, address: address ?? {} } : rest,
+)
 
 interface ProducerFormProps {
   onAdded: (producer: ProducerView) => void

@@ -14,6 +14,7 @@ import { JobMailController } from './job-mail.controller.js'
 import { LandownerActs } from './landowner-acts.service.js'
 import { OfficeActs } from './office-acts.service.js'
 import { RecipientsService } from './recipients.service.js'
+import { SecondTriesService } from './second-tries.service.js'
 import { SupervisorActs } from './supervisor-acts.service.js'
 
 /** Moves jobs. It stands on top of the other domains, and none of them knows it. */
@@ -28,6 +29,7 @@ import { SupervisorActs } from './supervisor-acts.service.js'
     LandownerActs,
     OfficeActs,
     RecipientsService,
+    SecondTriesService,
     SupervisorActs,
   ],
   exports: [ActsService],

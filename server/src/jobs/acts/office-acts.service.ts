@@ -19,7 +19,7 @@ export class OfficeActs {
   ) {}
 
   /** Each signer with an e-mail gets a link of their own. Who has none gets paper, which no queue can send. */
-  async inviteSigners(tx: Tx, { job }: ActContext<'send-to-landowner'>): Promise<ActEffect> {
+  async inviteSigners(tx: Tx, { job }: Pick<ActContext, 'job'>): Promise<ActEffect> {
     const signers = await this.recipients.signers(tx, job.id)
     for (const { personId, name, address } of signers) {
       const { token, daysValid } = await this.links.make(tx, { personId, jobId: job.id })

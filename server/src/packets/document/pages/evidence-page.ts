@@ -74,7 +74,7 @@ function signatureBlocks(signature: PacketSignature, both: (at: string) => strin
         { name: 'At', value: both(signature.signedAt) },
         { name: 'How', value: methodWords[signature.method] },
         { name: 'Consent text', value: `version ${signature.consentVersion}` },
-        { name: 'Address, program', value: `${signature.ip}, ${signature.userAgent}` },
+        { name: 'Address, program', value: [signature.ip, signature.userAgent].filter(Boolean).join(', ') },
       ],
     },
   ]
