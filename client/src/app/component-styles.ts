@@ -44,6 +44,8 @@ const buttonStyles = (tokens: ThemeTokens): Styles['MuiButton'] => ({
       textUnderlineOffset: 3,
       color: tokens.water,
       padding: '6px 4px',
+      marginLeft: -4,
+      minWidth: 0,
     },
   },
 })

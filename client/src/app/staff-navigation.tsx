@@ -1,6 +1,7 @@
 import Box from '@mui/material/Box'
 import type { Permission } from 'shared'
-import { NavLink } from 'react-router-dom'
+import { useEffect, useRef } from 'react'
+import { NavLink, useLocation } from 'react-router-dom'
 import { useMay } from '../api/session-context'
 
 interface Place {
@@ -19,11 +20,21 @@ const places: readonly Place[] = [
   { to: '/people', words: 'People', needs: 'people:read' },
 ]
 
+/** On a phone the places scroll sideways, and the one that one is at is brought into view. */
 export function StaffNavigation() {
   const may = useMay()
+  const { pathname } = useLocation()
+  const bar = useRef<HTMLElement>(null)
+
+  useEffect(() => {
+    const current = bar.current?.querySelector<HTMLElement>('[aria-current="page"]')
+    current?.scrollIntoView?.({ block: 'nearest', inline: 'center' })
+  }, [pathname])
+
   return (
     <Box
       component="nav"
+      ref={bar}
       aria-label="Wadestone"
       sx={{ display: 'flex', gap: { xs: 5, md: 6 }, overflowX: 'auto' }}
     >

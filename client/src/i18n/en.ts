@@ -176,6 +176,7 @@ export const en = {
   /** Sentences of the rules that client and server share, for those who read another language. */
   reasons: {
     notSigner: 'You are not a signer of this job.',
+    judgedIt: 'You designed or checked this packet, so you cannot sign it.',
     signedAlready: 'You have signed this revision already.',
     notSigned: 'You have not signed this revision.',
     consentMissing: 'You have not agreed to electronic records yet.',

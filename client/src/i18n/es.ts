@@ -176,6 +176,7 @@ export const es: Catalogue = {
   },
   reasons: {
     notSigner: 'Usted no firma en este trabajo.',
+    judgedIt: 'Usted diseñó o verificó este paquete; por eso no puede firmarlo.',
     signedAlready: 'Usted ya firmó esta revisión.',
     notSigned: 'Usted no ha firmado esta revisión.',
     consentMissing: 'Todavía no aceptó los registros electrónicos.',

@@ -4,13 +4,12 @@ import { Problem } from 'shared'
 import { IsNull, LessThan, MoreThan } from 'typeorm'
 import { MailService } from '../mail/mail.service.js'
 import { Config } from '../platform/config/config.js'
-import { UnitOfWork } from '../platform/database/unit-of-work.js'
+import { UnitOfWork, withAccounts } from '../platform/database/unit-of-work.js'
 import type { AccountsTx } from '../platform/database/tx.js'
 import { EventLog } from '../platform/events/event-log.service.js'
 import { EntryCode } from './entry-code.entity.js'
 import type { EntryLink } from './entry-link.entity.js'
 import { EntryLinksService } from './entry-links.service.js'
-import { Person } from './person.entity.js'
 import type { Session } from './session.entity.js'
 import { SessionsService } from './sessions.service.js'
 
@@ -32,14 +31,14 @@ export class EntryService {
 
   /** Mails a new code; the one before it is spent. */
   async open(token: string): Promise<{ emailHint: string }> {
-    const { link, person } = await this.unitOfWork.runForAccounts(async (tx) => {
-      const found = await this.links.find(tx, token)
-      const owner = await tx.manager.findOneByOrFail(Person, { id: found.personId, isActive: true })
-      await this.refuseFlood(tx, found)
-      return { link: found, person: owner }
-    })
-    const scope = { personId: person.id, districtId: link.districtId }
-    await this.unitOfWork.run(scope, async (tx) => {
+    const found = await this.unitOfWork.runForAccounts((tx) => this.links.find(tx, token))
+    const scope = { personId: found.personId, districtId: found.districtId }
+    return this.unitOfWork.run(scope, async (tx) => {
+      const { link, person } = await withAccounts(tx, async (accounts) => {
+        const held = await this.links.hold(accounts, token)
+        await this.refuseFlood(accounts, held)
+        return { link: held, person: await this.links.personOf(accounts, held) }
+      })
       const code = String(randomInt(1_000_000)).padStart(6, '0')
       const { districtId, at } = tx
       await tx.manager.update(EntryCode, { districtId, linkId: link.id, usedAt: IsNull() }, { usedAt: at })
@@ -59,8 +58,8 @@ export class EntryService {
         to: { personId: person.id, address: person.email },
         facts: { code, minutesValid },
       })
+      return { emailHint: hint(person.email) }
     })
-    return { emailHint: hint(person.email) }
   }
 
   /** @throws Problem wrong-code whatever is wrong with it. A wrong try stays counted. */
@@ -74,7 +73,8 @@ export class EntryService {
     userAgent: string
   }): Promise<Session> {
     const session = await this.unitOfWork.runForAccounts(async (tx) => {
-      const link = await this.links.find(tx, token)
+      const link = await this.links.hold(tx, token)
+      await this.links.personOf(tx, link)
       if (!(await this.spend(tx, link, code))) return null
       const { personId, districtId, jobId } = link
       return this.sessions.begin(tx, { personId, districtId, jobId, userAgent })

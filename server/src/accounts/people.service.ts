@@ -25,11 +25,14 @@ export class PeopleService {
     })
   }
 
-  /** Adds a member of staff. A person new to Wadestone gets a password that is shown once. */
+  /**
+   * Adds a member of staff. A person new to Wadestone gets a password that is shown once. For one who is known
+   * already nobody here may make a password: it would open the other districts of that person too.
+   */
   async add(tx: Tx, input: PersonInput): Promise<{ person: PersonView; temporaryPassword: string | null }> {
     return withAccounts(tx, async (accounts) => {
       const known = await accounts.manager.findOneBy(Person, { email: input.email })
-      const temporaryPassword = known?.passwordHash ? null : randomBytes(15).toString('base64url')
+      const temporaryPassword = known === null ? randomBytes(15).toString('base64url') : null
       const person = known ?? (await this.make(accounts, input))
       if (temporaryPassword !== null) {
         const passwordHash = await hashPassword(temporaryPassword, this.config.secrets.passwordPepper)

@@ -1,5 +1,5 @@
 import { Controller, Delete, Get, HttpCode, Param } from '@nestjs/common'
-import type { SessionListItem } from 'shared'
+import { Problem, type SessionListItem } from 'shared'
 import type { Caller } from '../platform/auth/caller.js'
 import { Requires } from '../platform/auth/requires.decorator.js'
 import { WhoCalls } from '../platform/auth/who-calls.decorator.js'
@@ -16,14 +16,22 @@ export class SessionsController {
 
   @Get()
   @Requires('signed-in')
-  list(@WhoCalls() { actor, sessionId }: Caller): Promise<SessionListItem[]> {
-    return this.unitOfWork.runForAccounts((tx) => this.sessions.list(tx, actor.personId, sessionId))
+  async list(@WhoCalls() { actor, sessionId, onlyJobId }: Caller): Promise<SessionListItem[]> {
+    const all = await this.unitOfWork.runForAccounts((tx) =>
+      this.sessions.list(tx, actor.personId, sessionId),
+    )
+    // A mailed link opens one job, and nothing of what the same person does elsewhere.
+    return onlyJobId === null ? all : all.filter(({ isThis }) => isThis)
   }
 
   @Delete(':id')
   @HttpCode(204)
   @Requires('signed-in')
-  end(@WhoCalls() { actor }: Caller, @Param('id', idParam) id: string): Promise<void> {
+  async end(
+    @WhoCalls() { actor, sessionId, onlyJobId }: Caller,
+    @Param('id', idParam) id: string,
+  ): Promise<void> {
+    if (onlyJobId !== null && id !== sessionId) throw new Problem('not-found')
     return this.unitOfWork.runForAccounts((tx) => this.sessions.end(tx, actor.personId, id))
   }
 }

@@ -24,42 +24,49 @@ const forgottenAfterMs = 60 * 60 * 1000
 export class SignInThrottle {
   constructor(private readonly config: Config) {}
 
-  /** @throws Problem too-many-tries with the seconds to wait. */
-  async refuseWhileBlocked(tx: AccountsTx, attempt: Attempt): Promise<void> {
-    const keys = Object.values(this.keysOf(attempt))
-    const rows = await tx.manager.findBy(SignInAttempt, { key: In(keys) })
+  /**
+   * Counts a try as failed before the password is looked at, so that tries at the same time cannot share a free one.
+   *
+   * @throws Problem too-many-tries with the seconds to wait; such a try is not counted.
+   */
+  async begin(tx: AccountsTx, attempt: Attempt): Promise<void> {
+    const keys = this.keysOf(attempt)
+    const rows = await this.hold(tx, Object.values(keys))
     const until = Math.max(0, ...rows.map(({ blockedUntil }) => blockedUntil?.getTime() ?? 0))
     const retryAfterSeconds = Math.ceil((until - tx.at.getTime()) / 1000)
-    if (retryAfterSeconds <= 0) return
-    throw new Problem('too-many-tries', {
-      retryAfterSeconds,
-      detail: `Wait ${retryAfterSeconds} seconds, then try again.`,
-    })
-  }
-
-  async noteFailure(tx: AccountsTx, attempt: Attempt): Promise<void> {
-    const keys = this.keysOf(attempt)
+    if (retryAfterSeconds > 0) {
+      const detail = `Wait ${retryAfterSeconds} seconds, then try again.`
+      throw new Problem('too-many-tries', { retryAfterSeconds, detail })
+    }
     for (const kind of ['pair', 'ip'] as const) {
-      const [{ failures }] = await tx.manager.query(
-        `insert into sign_in_attempts as a (key, failures, last_tried_at) values ($1, 1, $2)
-         on conflict (key) do update set last_tried_at = $2,
-           failures = case when a.last_tried_at < $3 then 1 else a.failures + 1 end
-         returning failures`,
-        [keys[kind], tx.at, new Date(tx.at.getTime() - forgottenAfterMs)],
-      )
-      const beyond = failures - freeFailures[kind]
-      if (beyond < 0) continue
-      const waitMs = Math.min(2 ** beyond, longestWaitS) * 1000
-      await tx.manager.update(
-        SignInAttempt,
-        { key: keys[kind] },
-        { blockedUntil: new Date(tx.at.getTime() + waitMs) },
-      )
+      const row = rows.find(({ key }) => key === keys[kind])
+      await tx.manager.update(SignInAttempt, { key: keys[kind] }, nextFailure(row, kind, tx.at))
     }
   }
 
-  async forget(tx: AccountsTx, attempt: Attempt): Promise<void> {
-    await tx.manager.delete(SignInAttempt, { key: this.keysOf(attempt).pair })
+  /** The try was no guess after all. */
+  async succeed(tx: AccountsTx, attempt: Attempt): Promise<void> {
+    const { pair, ip } = this.keysOf(attempt)
+    const [row] = await this.hold(tx, [ip])
+    const failures = Math.max(0, (row?.failures ?? 1) - 1)
+    await tx.manager.update(SignInAttempt, { key: ip }, { failures, blockedUntil: null })
+    await tx.manager.delete(SignInAttempt, { key: pair })
+  }
+
+  /** In one order always, so that two tries never wait for each other. */
+  private async hold(tx: AccountsTx, keys: readonly string[]): Promise<SignInAttempt[]> {
+    const sorted = [...keys].sort()
+    for (const key of sorted) {
+      await tx.manager.query(
+        'insert into sign_in_attempts (key, failures, last_tried_at) values ($1, 0, $2) on conflict do nothing',
+        [key, tx.at],
+      )
+    }
+    return tx.manager.find(SignInAttempt, {
+      where: { key: In(sorted) },
+      order: { key: 'ASC' },
+      lock: { mode: 'pessimistic_write' },
+    })
   }
 
   private keysOf({ email, ip }: Attempt) {
@@ -69,4 +76,13 @@ export class SignInThrottle {
   private keyed(text: string): string {
     return createHmac('sha256', this.config.secrets.jwtSecret).update(text).digest('base64url')
   }
+}
+
+function nextFailure(row: SignInAttempt | undefined, kind: keyof typeof freeFailures, at: Date) {
+  const isForgotten = row === undefined || at.getTime() - row.lastTriedAt.getTime() > forgottenAfterMs
+  const failures = isForgotten ? 1 : row.failures + 1
+  const beyond = failures - freeFailures[kind]
+  const waitMs = Math.min(2 ** Math.max(0, beyond), longestWaitS) * 1000
+  const blockedUntil = beyond < 0 ? null : new Date(at.getTime() + waitMs)
+  return { failures, lastTriedAt: at, blockedUntil }
 }

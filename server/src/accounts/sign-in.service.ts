@@ -29,17 +29,15 @@ export class SignInService {
 
   async signIn(request: SignInRequest): Promise<Session> {
     const person = await this.unitOfWork.runForAccounts(async (tx) => {
-      await this.throttle.refuseWhileBlocked(tx, request)
+      await this.throttle.begin(tx, request)
       return tx.manager.findOneBy(Person, { email: request.email })
     })
     // Compared outside a transaction: it takes long on purpose, and must not hold a connection meanwhile.
     const { passwordPepper } = this.config.secrets
     const fits = await isPassword(request.password, person?.passwordHash ?? null, passwordPepper)
-    // Two transactions, since the failure has to stay on record when the request is refused.
     const session = await this.unitOfWork.runForAccounts(async (tx) => {
       const opened = person !== null && fits && person.isActive ? await this.open(tx, person, request) : null
-      if (opened === null) await this.throttle.noteFailure(tx, request)
-      else await this.throttle.forget(tx, request)
+      if (opened !== null) await this.throttle.succeed(tx, request)
       return opened
     })
     if (session === null) throw new Problem('wrong-sign-in')

@@ -66,7 +66,7 @@ async function apply(
   const own = asking.onlyJobId === null ? {} : { jobId: asking.onlyJobId }
   const start = { personId, districtId, userAgent, ...own }
   const { id: sessionId } = await withAccounts(tx, (accounts) => sessions.begin(accounts, start))
-  const origin = { sessionId, remoteAddress: '127.0.0.1', userAgent }
+  const origin = { sessionId, cameByLink: asking.onlyJobId !== null, remoteAddress: '127.0.0.1', userAgent }
   await acts.apply(actingAs(tx, asking), asking, { jobId: job.id, act, origin })
   await withAccounts(tx, (accounts) => sessions.end(accounts, personId, sessionId))
 }

@@ -1,6 +1,6 @@
 import { randomUUID } from 'node:crypto'
 import { Injectable } from '@nestjs/common'
-import { Problem, type SurveyInput } from 'shared'
+import { Problem, type SettingValue, type SurveyInput } from 'shared'
 import { JobAccessService } from '../jobs/job-access.service.js'
 import type { Job } from '../jobs/job.entity.js'
 import { JobsService } from '../jobs/jobs.service.js'
@@ -12,6 +12,7 @@ import { Design } from './design.entity.js'
 import { listFigures } from './list-figures.js'
 import { refuseEmptySettings, refuseIncomplete, refuseUnmapped } from './refuse-unready.js'
 import { Revision } from './revision.entity.js'
+import type { RulesInForce } from './rules-in-force.js'
 import { upgradePlan } from './upgrade-plan.js'
 
 /** Freezes a design for a packet: from then on nobody can change what the packet shows. */
@@ -56,6 +57,7 @@ export class FreezeDesignService {
       criteriaSetId: resolvedWith.criteriaSet?.id ?? null,
       costListId: resolvedWith.costList?.id ?? null,
       scheduleIds: resolvedWith.schedules.map(({ id }) => id),
+      settings: enteredSettings(rules),
       designerId: design.designerId,
       madeBy: tx.personId ?? design.designerId,
       madeAt: tx.at,
@@ -96,3 +98,8 @@ export class FreezeDesignService {
     return ((await tx.manager.maximum(Revision, 'number', { districtId: tx.districtId, jobId })) ?? 0) + 1
   }
 }
+
+const enteredSettings = ({ settings }: RulesInForce): SettingValue[] =>
+  settings
+    .filter(({ value }) => value !== null)
+    .map(({ key, value, source, sourceDate }) => ({ key, value, source, sourceDate }))

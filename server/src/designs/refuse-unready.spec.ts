@@ -31,7 +31,14 @@ const rules: RulesInForce = {
   costList: { id: 'l', name: 'Costs', lines: [] },
   schedules: [schedule],
   settings: [
-    { key: 'swellPercent', label: 'Swell of excavated earth', isNeeded: true, value: 25, source: 'board' },
+    {
+      key: 'swellPercent',
+      label: 'Swell of excavated earth',
+      isNeeded: true,
+      value: 25,
+      sourceDate: '2026-01-01',
+      source: 'board',
+    },
   ],
 }
 

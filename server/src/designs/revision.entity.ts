@@ -1,5 +1,5 @@
 import { Entity, Unique } from 'typeorm'
-import type { DesignPlan, DesignResult, SurveyInput } from 'shared'
+import type { DesignPlan, DesignResult, SettingValue, SurveyInput } from 'shared'
 import {
   CountColumn,
   DistrictIdColumn,
@@ -44,6 +44,9 @@ export class Revision {
   @ReferenceColumn({ nullable: true }) costListId: string | null
 
   @ReferenceColumn({ array: true }) scheduleIds: string[]
+
+  /** Those that were entered, as they stood. */
+  @JsonColumn() settings: SettingValue[]
 
   @ReferenceColumn() designerId: string
 

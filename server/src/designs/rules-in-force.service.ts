@@ -33,7 +33,14 @@ export class RulesInForceService {
     const byKey = new Map(entered.map((setting) => [setting.key, setting]))
     return settingsCatalogue.map(({ key, label, isNeeded }) => {
       const setting = byKey.get(key)
-      return { key, label, isNeeded, value: setting?.value ?? null, source: setting?.source ?? '' }
+      return {
+        key,
+        label,
+        isNeeded,
+        value: setting?.value ?? null,
+        source: setting?.source ?? '',
+        sourceDate: setting?.sourceDate ?? '',
+      }
     })
   }
 }

@@ -8,6 +8,7 @@ export interface SettingInForce {
   isNeeded: boolean
   value: number | null
   source: string
+  sourceDate: string
 }
 
 /** All that a district holds against a design on one civil date. */

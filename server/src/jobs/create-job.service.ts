@@ -1,7 +1,7 @@
 import { randomUUID } from 'node:crypto'
 import { Injectable } from '@nestjs/common'
 import { In } from 'typeorm'
-import { Problem, type JobInput } from 'shared'
+import { Problem, type FieldProblem, type JobInput } from 'shared'
 import { District } from '../districts/district.entity.js'
 import { civilDateIn } from '../platform/clock/civil-date.js'
 import type { Tx } from '../platform/database/tx.js'
@@ -69,7 +69,18 @@ export class CreateJobService {
       const isTwice = producerIds.indexOf(id) !== index
       return isTwice ? [{ pointer, message: 'This producer is named twice.' }] : []
     })
+    fields.push(...sharedAddresses(producerIds.flatMap((id) => byId.get(id) ?? [])))
     if (fields.length > 0) throw new Problem('invalid-fields', { fields })
     return producerIds.flatMap((id) => byId.get(id) ?? [])
   }
+}
+
+/** Two producers with one address are one person here, who would sign for both. */
+function sharedAddresses(producers: readonly Producer[]): FieldProblem[] {
+  return producers.flatMap(({ personId, name }, index) => {
+    const first = producers.findIndex((other) => other.personId === personId)
+    if (personId === null || first === index || producers[first]?.id === producers[index]?.id) return []
+    const message = `${name} has the same e-mail as ${producers[first]?.name}. Each signer needs an own address.`
+    return [{ pointer: `/producerIds/${index}`, message }]
+  })
 }

@@ -38,6 +38,10 @@ const actSentences: Record<JobAction, Sentence> = {
 
 const otherSentences = {
   'job-created': (e) => `${e.who} opened the job.`,
+  'producer-changed': (e) =>
+    e.facts['signerChanged'] === true
+      ? `${e.who} changed a producer of this job, and with the address who signs.`
+      : `${e.who} changed a producer of this job.`,
   'survey-saved': (e) => `${e.who} saved the survey.`,
   'design-created': (e) => `${e.who} began the design "${e.design}".`,
   'design-saved': (e) => `${e.who} saved the design "${e.design}".`,

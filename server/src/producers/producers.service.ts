@@ -4,8 +4,11 @@ import { Brackets } from 'typeorm'
 import { Problem, type ProducerInput, type ProducerView } from 'shared'
 import { PeopleService } from '../accounts/people.service.js'
 import type { Tx } from '../platform/database/tx.js'
+import { EventLog } from '../platform/events/event-log.service.js'
 import { producerView } from './producer-view.js'
 import { Producer } from './producer.entity.js'
+import { refuseOtherSigner } from './refuse-other-signer.js'
+import { holdOpenJobs } from './signing-jobs.js'
 
 const mostListed = 200
 
@@ -17,7 +20,10 @@ export interface VersionedProducer {
 /** The livestock producers of a district. One with an e-mail is also a person who can read and sign. */
 @Injectable()
 export class ProducersService {
-  constructor(private readonly people: PeopleService) {}
+  constructor(
+    private readonly people: PeopleService,
+    private readonly events: EventLog,
+  ) {}
 
   /** By name; `find` is looked for in name, farm and e-mail. */
   async list(tx: Tx, find: string): Promise<ProducerView[]> {
@@ -66,8 +72,23 @@ export class ProducersService {
       throw new Problem('stale-version', { detail, current: producerView(before) })
     }
     const saved = { ...(await this.columnsOf(tx, input)), version: version + 1, updatedAt: tx.at }
+    await this.tellJobs(tx, before, saved)
     await tx.manager.update(Producer, { districtId: tx.districtId, id }, saved)
     return versioned(Object.assign(before, saved))
+  }
+
+  /** Who signs hangs on the address, so each job that is under way has it in its record. */
+  private async tellJobs(
+    tx: Tx,
+    { id: producerId, personId: before }: Producer,
+    { personId, version }: Pick<Producer, 'personId' | 'version'>,
+  ): Promise<void> {
+    const jobs = await holdOpenJobs(tx, { producerId, personId })
+    if (personId !== before) refuseOtherSigner(jobs)
+    for (const { jobId } of jobs) {
+      const facts = { producerId, version, signerChanged: personId !== before }
+      await this.events.append(tx, { streamId: jobId, kind: 'producer-changed', facts })
+    }
   }
 
   /** The whole producer is given each time, so what is left out is taken away. */

@@ -8,6 +8,8 @@ import {
 } from '../platform/database/columns.js'
 import { RefersTo } from '../platform/database/references.js'
 
+export type SignatureMethod = 'mailed-link-and-code' | 'password' | 'at-the-table' | 'on-paper'
+
 /** A signature is never deleted; a void one stays in plain sight. */
 @Entity('signatures')
 @Index('uq_signatures_standing', ['districtId', 'packetId', 'personId'], {
@@ -36,6 +38,9 @@ export class Signature {
   @ReferenceColumn() consentId: string
 
   @ReferenceColumn() sessionId: string
+
+  /** How the signer came in. */
+  @TextColumn() method: SignatureMethod
 
   /** As the server saw it, through trusted proxies only. */
   @TextColumn() remoteAddress: string

@@ -4,7 +4,7 @@ import { In, IsNull } from 'typeorm'
 import { Problem } from 'shared'
 import type { Tx } from '../platform/database/tx.js'
 import { ConsentsService } from './consents.service.js'
-import { Signature } from './signature.entity.js'
+import { Signature, type SignatureMethod } from './signature.entity.js'
 
 export interface SignatureToRecord {
   jobId: string
@@ -14,6 +14,7 @@ export interface SignatureToRecord {
   typedName: string
   /** As the server saw them, never as the signer's browser says in a body. */
   sessionId: string
+  method: SignatureMethod
   remoteAddress: string
   userAgent: string
 }

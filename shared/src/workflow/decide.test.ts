@@ -115,6 +115,7 @@ const broken: Record<
   noOpenNote: { facts: { openNotes: 1 } },
   landownerReachable: { facts: { landownerAddressKnown: false } },
   isSigner: { facts: { requiredSignerIds: ['somebody'] } },
+  signerIsNoJudge: { facts: { technicalCheck: { checkerId: landowner, withinLimits: true } } },
   notSignedYet: { facts: { signedByIds: [landowner] } },
   hasSigned: { facts: { signedByIds: [] } },
   hasConsented: { facts: { consentedIds: [] } },

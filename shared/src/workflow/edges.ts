@@ -60,7 +60,7 @@ export const edges: readonly Edge[] = [
     to: 'with-supervisor',
     toWhile: { to: 'with-landowner', holds: othersStillSign },
     roles: ['landowner'],
-    guards: ['isSigner', 'notSignedYet', 'hasConsented', 'hasRead', 'hashMatches'],
+    guards: ['isSigner', 'signerIsNoJudge', 'notSignedYet', 'hasConsented', 'hasRead', 'hashMatches'],
   },
   {
     from: ['with-landowner'],

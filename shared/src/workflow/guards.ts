@@ -51,6 +51,11 @@ export const guards = {
   landownerReachable: (f) =>
     unless(f.landownerAddressKnown, 'The landowner has neither an e-mail nor a postal address.'),
   isSigner: (f, a) => unless(f.requiredSignerIds.includes(a.personId), 'You are not a signer of this job.'),
+  signerIsNoJudge: (f, a) =>
+    unless(
+      !designed(f, a.personId) && f.technicalCheck?.checkerId !== a.personId,
+      'You designed or checked this packet, so you cannot sign it.',
+    ),
   notSignedYet: (f, a) =>
     unless(!f.signedByIds.includes(a.personId), 'You have signed this revision already.'),
   hasSigned: (f, a) => unless(f.signedByIds.includes(a.personId), 'You have not signed this revision.'),

@@ -14,7 +14,9 @@ interface ProblemAlertProps {
 export function ProblemAlert({ error, ref, children }: ProblemAlertProps) {
   if (error === null) return null
   const problem = error instanceof ProblemError ? error : null
-  const reasons = (problem?.reasons ?? []).filter((reason) => reason !== error.message)
+  const isNews = (sentence: string) => sentence !== error.message
+  const reasons = (problem?.reasons ?? []).filter(isNews)
+  const fields = (problem?.fields ?? []).map(({ message }) => message).filter(isNews)
   return (
     <Box
       ref={ref}
@@ -27,9 +29,7 @@ export function ProblemAlert({ error, ref, children }: ProblemAlertProps) {
       </Typography>
       {error.message !== problem?.title && <Typography>{error.message}</Typography>}
       {reasons.length > 0 && <Sentences sentences={reasons} />}
-      {problem && problem.fields.length > 0 && (
-        <Sentences sentences={problem.fields.map((field) => field.message)} />
-      )}
+      {fields.length > 0 && <Sentences sentences={fields} />}
       {problem?.requestId && problem.status >= 500 && (
         <Typography variant="body2" sx={{ color: 'text.secondary' }}>
           Tell the office this number: {problem.requestId}

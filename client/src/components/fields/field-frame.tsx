@@ -7,6 +7,8 @@ export interface FieldWords {
   hint?: ReactNode
   /** Shown after the box and told to screen readers with the label. */
   unit?: string
+  /** The heads of a table say it already; it is still told to screen readers. */
+  isLabelHidden?: boolean
 }
 
 interface FieldFrameProps extends FieldWords {
@@ -23,25 +25,12 @@ export const errorId = (id: string) => `${id}-error`
 export const describedBy = (id: string, hint: ReactNode, error: string | undefined): string | undefined =>
   [hint ? hintId(id) : null, error ? errorId(id) : null].filter(Boolean).join(' ') || undefined
 
-/** Label above, hint under it, control, unit after it, error last. */
-export function FieldFrame({ id, label, hint, unit, error, isOptional, children }: FieldFrameProps) {
+/** Label above, hint under it, control, unit after it, error last: three rows that a grid of fields lines up. */
+export function FieldFrame({ id, error, children, ...words }: FieldFrameProps) {
+  const { unit } = words
   return (
-    <Box sx={{ minWidth: 0 }}>
-      <Typography component="label" htmlFor={id} sx={{ display: 'block', fontWeight: 600 }}>
-        {label}
-        {unit && <span className="visually-hidden">, {unit}</span>}
-        {isOptional && (
-          <Typography component="span" sx={{ color: 'text.secondary' }}>
-            {' '}
-            (if known)
-          </Typography>
-        )}
-      </Typography>
-      {hint && (
-        <Typography id={hintId(id)} variant="body2" sx={{ color: 'text.secondary' }}>
-          {hint}
-        </Typography>
-      )}
+    <Box className="field-frame" sx={{ minWidth: 0 }}>
+      <FieldHead id={id} {...words} />
       <Box sx={{ display: 'flex', alignItems: 'center', gap: 2, mt: 1 }}>
         {children}
         {unit && (
@@ -58,6 +47,35 @@ export function FieldFrame({ id, label, hint, unit, error, isOptional, children 
       {error && (
         <Typography id={errorId(id)} variant="body2" sx={{ color: 'error.main', fontWeight: 600, mt: 1 }}>
           {error}
+        </Typography>
+      )}
+    </Box>
+  )
+}
+
+type FieldHeadProps = FieldWords & Pick<FieldFrameProps, 'id' | 'isOptional'>
+
+function FieldHead({ id, label, hint, unit, isOptional, isLabelHidden }: FieldHeadProps) {
+  return (
+    <Box sx={{ alignSelf: 'end' }}>
+      <Typography
+        component="label"
+        htmlFor={id}
+        className={isLabelHidden ? 'visually-hidden' : undefined}
+        sx={isLabelHidden ? undefined : { display: 'block', fontWeight: 600 }}
+      >
+        {label}
+        {unit && <span className="visually-hidden">, {unit}</span>}
+        {isOptional && (
+          <Typography component="span" sx={{ color: 'text.secondary' }}>
+            {' '}
+            (if known)
+          </Typography>
+        )}
+      </Typography>
+      {hint && (
+        <Typography id={hintId(id)} variant="body2" sx={{ color: 'text.secondary' }}>
+          {hint}
         </Typography>
       )}
     </Box>

@@ -7,6 +7,12 @@ interface FieldGridProps {
   column?: number
 }
 
+/** A field takes three rows of the grid, so that boxes stand in line where one label has a hint and the next has none. */
+const inLine = {
+  '& > *': { gridRow: 'span 3', mb: 5 },
+  '& > .field-frame': { display: 'grid', gridTemplateRows: 'subgrid', alignItems: 'start' },
+} as const
+
 /** Fields side by side where there is room, under each other where there is not. */
 export function FieldGrid({ children, column = 240 }: FieldGridProps) {
   return (
@@ -14,9 +20,10 @@ export function FieldGrid({ children, column = 240 }: FieldGridProps) {
       sx={{
         display: 'grid',
         gridTemplateColumns: `repeat(auto-fill, minmax(min(${column}px, 100%), 1fr))`,
-        gap: 5,
+        columnGap: 5,
         alignItems: 'start',
-        my: 4,
+        mt: 4,
+        ...inLine,
       }}
     >
       {children}

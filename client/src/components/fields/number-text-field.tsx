@@ -10,11 +10,12 @@ interface NumberTextFieldProps extends FieldWords {
 }
 
 /** Figures that stay decimal strings: money and rates. */
-export function NumberTextField({ name, label, hint, unit, isOptional, tidy }: NumberTextFieldProps) {
+export function NumberTextField({ name, isOptional, tidy, ...words }: NumberTextFieldProps) {
+  const { label, hint } = words
   const { id, field, error } = useField(name, label)
   const store = (typed: string) => field.onChange(typed === '' ? undefined : typed)
   return (
-    <FieldFrame id={id} label={label} hint={hint} unit={unit} error={error} isOptional={isOptional}>
+    <FieldFrame id={id} {...words} error={error} isOptional={isOptional}>
       <InputBase
         id={id}
         name={name}

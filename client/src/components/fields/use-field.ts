@@ -4,7 +4,9 @@ import { useFieldLabel } from './form-labels'
 
 /** One field of the form around it: its value, its error in words and the id of its control. */
 export function useField(name: string, label: string) {
-  const { field, fieldState } = useController({ name })
+  const { field, fieldState, formState } = useController({ name })
   useFieldLabel(name, label)
-  return { id: fieldId(name), field, error: fieldState.error?.message }
+  // The library judges a new row as it is added; its boxes keep quiet until they were visited.
+  const isHeard = fieldState.isTouched || formState.isSubmitted
+  return { id: fieldId(name), field, error: isHeard ? fieldState.error?.message : undefined }
 }

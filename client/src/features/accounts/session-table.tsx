@@ -6,6 +6,7 @@ import { useEndSession } from '../../api/session'
 import { ProblemAlert } from '../../components/feedback/problem-alert'
 import { Instant } from '../../components/layout/instant'
 import { RuledTable, type Column } from '../../components/layout/ruled-table'
+import { deviceWords } from './device-words'
 
 const columns: readonly Column[] = [
   { key: 'where', title: 'Device and browser' },
@@ -28,7 +29,7 @@ export function SessionTable({ sessions }: SessionTableProps) {
         {sessions.map(({ id, userAgent, startedAt, lastSeenAt, isThis }) => (
           <TableRow key={id}>
             <TableCell component="th" scope="row" sx={{ overflowWrap: 'anywhere' }}>
-              {userAgent || 'not named'}
+              {deviceWords(userAgent)}
             </TableCell>
             <TableCell>
               <Instant at={startedAt} />
@@ -36,13 +37,13 @@ export function SessionTable({ sessions }: SessionTableProps) {
             <TableCell>
               <Instant at={lastSeenAt} />
             </TableCell>
-            <TableCell>
+            <TableCell sx={{ whiteSpace: 'nowrap' }}>
               {isThis ? (
                 'this one'
               ) : (
                 <Button
                   aria-disabled={end.isPending}
-                  aria-label={`End the session on ${userAgent || 'a device that is not named'}`}
+                  aria-label={`End the session on ${userAgent === '' ? 'a device that is not named' : deviceWords(userAgent)}`}
                   onClick={() => {
                     if (!end.isPending) end.mutate(id)
                   }}

@@ -1,6 +1,7 @@
 import TableCell from '@mui/material/TableCell'
 import TableRow from '@mui/material/TableRow'
-import { quantityCatalogue, quantityKeys, unitText, type CostListView } from 'shared'
+import { quantityCatalogue, quantityKeys, type CostListView } from 'shared'
+import { perUnit } from '../../components/layout/per-unit'
 import { FigureCell, RuledTable, type Column } from '../../components/layout/ruled-table'
 
 const columns: readonly Column[] = [
@@ -23,7 +24,7 @@ export function CostListPrices({ list }: CostListPricesProps) {
         const line = list.lines.find((one) => one.key === key)
         const { description, practice, unit } = quantityCatalogue[key]
         if (line === undefined) return []
-        const unitWords = unit === 'each' ? 'each' : `a ${unitText(unit, 1)}`
+        const unitWords = perUnit(unit)
         return [
           <TableRow key={key}>
             <TableCell component="th" scope="row">

@@ -1,7 +1,8 @@
 import TableCell from '@mui/material/TableCell'
 import TableRow from '@mui/material/TableRow'
-import { quantityCatalogue, unitText, type QuantityKey } from 'shared'
+import { quantityCatalogue, type QuantityKey } from 'shared'
 import { RateField } from '../../components/fields/rate-field'
+import { perUnit } from '../../components/layout/per-unit'
 
 const prices = [
   { name: 'low', label: 'Low' },
@@ -26,7 +27,8 @@ export function PriceRow({ quantity, index }: PriceRowProps) {
           <RateField
             name={`lines.${index}.${name}`}
             label={`${label}, ${description.toLowerCase()}`}
-            unit={unit === 'each' ? '$ each' : `$ a ${unitText(unit, 1)}`}
+            unit={`$ ${perUnit(unit)}`}
+            isLabelHidden
           />
         </TableCell>
       ))}

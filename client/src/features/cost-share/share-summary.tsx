@@ -12,7 +12,11 @@ export function ShareSummary({ cost, funding }: ShareSummaryProps) {
     <FigureRows>
       <FigureRow label="Estimated cost" value={moneyText(cost.typical)} />
       {funding.sources.map((source) => (
-        <FigureRow key={source.key} label={`Paid by ${source.name}`} value={moneyText(`-${source.paid}`)} />
+        <FigureRow
+          key={source.key}
+          label={`Paid by ${source.name}`}
+          value={<span style={{ whiteSpace: 'nowrap' }}>{moneyText(`-${source.paid}`)}</span>}
+        />
       ))}
       <FigureRow label="Landowner’s share" value={moneyText(funding.landownerShare)} isSum />
     </FigureRows>

@@ -61,6 +61,7 @@ export function DesignBody(props: DesignBodyProps) {
           designPath={designPath}
           result={result}
           resolvedWith={resolvedWith}
+          isBegun={Boolean(draft[spec.part])}
           isBehind={savable.unfinished.includes(spec.part)}
           isWorking={query.isFetching}
           problem={query.error}

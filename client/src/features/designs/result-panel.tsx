@@ -15,6 +15,8 @@ interface ResultPanelProps {
   /** The part on the page, and where its neighbours are. */
   part: DesignPart
   designPath: string
+  /** What nobody has begun is not wrong yet. */
+  isBegun: boolean
 }
 
 const titles: Partial<Record<ResultKey, string>> = {
@@ -25,7 +27,7 @@ const titles: Partial<Record<ResultKey, string>> = {
 }
 
 /** What follows from one part: its figures, or the sentence that says what is in the way and where it is mended. */
-export function ResultPanel({ resultKey, result, part, designPath }: ResultPanelProps) {
+export function ResultPanel({ resultKey, result, part, designPath, isBegun }: ResultPanelProps) {
   const found = result[resultKey]
   const title = titles[resultKey] ?? 'What follows'
   if (!found.ok && 'waitingFor' in found) {
@@ -37,7 +39,10 @@ export function ResultPanel({ resultKey, result, part, designPath }: ResultPanel
   }
   if (!found.ok) {
     return (
-      <Section title={title} aside={<VerdictMark kind="fail" words="needs another look" />}>
+      <Section
+        title={title}
+        aside={isBegun ? <VerdictMark kind="fail" words="needs another look" /> : <VerdictMark kind="waiting" />}
+      >
         <Typography sx={{ mt: 2 }}>{found.message}</Typography>
         <WayToField field={found.field} part={part} designPath={designPath} />
       </Section>

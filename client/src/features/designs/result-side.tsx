@@ -12,6 +12,7 @@ interface ResultSideProps {
   designPath: string
   result: DesignResult
   resolvedWith: ResolvedWith
+  isBegun: boolean
   /** The part on the page is not complete, so that the figures are of what was complete before. */
   isBehind: boolean
   isWorking: boolean
@@ -23,7 +24,7 @@ const counted = (result: DesignResult, verdict: 'pass' | 'caution' | 'fail'): nu
 
 /** What follows from the part, beside its form. */
 export function ResultSide(props: ResultSideProps) {
-  const { spec, designPath, result, resolvedWith, isBehind, isWorking, problem } = props
+  const { spec, designPath, result, resolvedWith, isBegun, isBehind, isWorking, problem } = props
   const jobPath = designPath.replace(/\/design\/.*$/, '')
   return (
     <Box component="aside" aria-label="What follows" aria-busy={isWorking} sx={{ minWidth: 0 }}>
@@ -35,7 +36,14 @@ export function ResultSide(props: ResultSideProps) {
       )}
       <ProblemAlert error={problem} />
       {spec.results.map((key) => (
-        <ResultPanel key={key} resultKey={key} result={result} part={spec.part} designPath={designPath} />
+        <ResultPanel
+          key={key}
+          resultKey={key}
+          result={result}
+          part={spec.part}
+          designPath={designPath}
+          isBegun={isBegun}
+        />
       ))}
       {resolvedWith.missing.length > 0 && (
         <Box component="ul" sx={{ pl: 5, mt: 4 }}>

@@ -46,7 +46,7 @@ export function DeskList({ items }: DeskListProps) {
             </Box>
             <Typography sx={{ fontWeight: 600, gridColumn: { sm: 2, md: 'auto' } }}>
               {item.title}
-              <Typography component="span" sx={{ color: 'text.secondary', pl: 2 }}>
+              <Typography component="span" sx={{ color: 'text.secondary', pl: 2, whiteSpace: 'nowrap' }}>
                 {item.number}
               </Typography>
             </Typography>

@@ -12,9 +12,14 @@ const nobody = {
   packetA: null,
 } as unknown as JobFacts
 
-/** What a guard says when its condition is not met: `notSignedYet` is the one that fails on a person who has. */
+/** What a guard says when its condition is not met: these fail on a person who did something, not on one who did not. */
+const done: Partial<Record<GuardName, Partial<JobFacts>>> = {
+  notSignedYet: { signedByIds: ['me'] },
+  signerIsNoJudge: { designerId: 'me' },
+}
+
 const sentenceOf = (name: GuardName) => {
-  const facts = name === 'notSignedYet' ? { ...nobody, signedByIds: ['me'] } : nobody
+  const facts = { ...nobody, ...done[name] }
   return guards[name](facts, me, { note: '', reason: '' }) ?? ''
 }
 

@@ -11,6 +11,7 @@ interface SharedSentence {
  */
 export const sharedSentences: readonly SharedSentence[] = [
   { says: /^You are not a signer of this job\.$/, key: 'reasons.notSigner' },
+  { says: /^You designed or checked this packet, so you cannot sign it\.$/, key: 'reasons.judgedIt' },
   { says: /^You have signed this revision already\.$/, key: 'reasons.signedAlready' },
   { says: /^You have not signed this revision\.$/, key: 'reasons.notSigned' },
   { says: /^You have not agreed to electronic records yet\.$/, key: 'reasons.consentMissing' },

@@ -11,8 +11,8 @@ export function RoleChoice() {
   const { id, field, error } = useField('roles', 'Roles')
   const chosen: readonly Role[] = Array.isArray(field.value) ? field.value : []
   return (
-    <Box component="fieldset" sx={{ border: 0, p: 0, m: 0 }} aria-describedby={error && errorId(id)}>
-      <Typography component="legend" sx={{ fontWeight: 600 }}>
+    <Box component="fieldset" sx={{ border: 0, p: 0, m: 0, minWidth: 0 }} aria-describedby={error && errorId(id)}>
+      <Typography component="legend" sx={{ fontWeight: 600, p: 0 }}>
         Roles
       </Typography>
       {staffRoles.map(({ role, does }, index) => {
@@ -25,7 +25,7 @@ export function RoleChoice() {
               onChange={({ target }) =>
                 field.onChange(target.checked ? [...chosen, role] : chosen.filter((one) => one !== role))
               }
-              sx={{ p: 1, mr: 1 }}
+              sx={{ p: 1, ml: -1, mr: 2 }}
             />
             <label htmlFor={boxId}>
               <strong>{role}</strong>: {does}

@@ -5,6 +5,7 @@ import type { ScheduleInput } from 'shared'
 import { FieldGrid } from '../../components/fields/field-grid'
 import { RateField } from '../../components/fields/rate-field'
 import { TextField } from '../../components/fields/text-field'
+import { perUnit } from '../../components/layout/per-unit'
 
 interface LineRowProps {
   index: number
@@ -25,7 +26,7 @@ export function LineRow({ index, isOpen, onOpen, onClose, onRemove }: LineRowPro
       ) : (
         <Box component="span" className="figure">
           <strong>{name}</strong>: {line.title}, practice {line.practice}, ${line.baseRate}
-          {line.higherRate && `, at the higher rate $${line.higherRate}`} a {line.unit}
+          {line.higherRate && `, at the higher rate $${line.higherRate}`} {perUnit(line.unit ?? '')}
         </Box>
       )}{' '}
       <Button variant="text" onClick={isOpen ? onClose : onOpen}>

@@ -2,6 +2,7 @@ import TableCell from '@mui/material/TableCell'
 import TableRow from '@mui/material/TableRow'
 import type { ScheduleLine } from 'shared'
 import { SelectField } from '../../components/fields/select-field'
+import { perUnit } from '../../components/layout/per-unit'
 import { FigureCell } from '../../components/layout/ruled-table'
 import { quantityChoices } from './quantity-choices'
 
@@ -20,7 +21,7 @@ export function MappingRow({ line, index }: MappingRowProps) {
       <TableCell>
         {line.title}, practice {line.practice}
       </TableCell>
-      <FigureCell unit={`a ${line.unit}`}>${line.baseRate}</FigureCell>
+      <FigureCell unit={perUnit(line.unit)}>${line.baseRate}</FigureCell>
       <TableCell>
         <SelectField
           name={`mapping.${index}.quantityKey`}

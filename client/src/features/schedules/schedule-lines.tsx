@@ -1,6 +1,7 @@
 import TableCell from '@mui/material/TableCell'
 import TableRow from '@mui/material/TableRow'
 import type { ScheduleLine } from 'shared'
+import { perUnit } from '../../components/layout/per-unit'
 import { FigureCell, RuledTable, type Column } from '../../components/layout/ruled-table'
 import { Section } from '../../components/layout/section'
 import { payWords } from './quantity-choices'
@@ -30,7 +31,7 @@ export function ScheduleLines({ lines }: ScheduleLinesProps) {
             <TableCell>
               {line.title}, practice {line.practice}
             </TableCell>
-            <FigureCell unit={`a ${line.unit}`}>${line.baseRate}</FigureCell>
+            <FigureCell unit={perUnit(line.unit)}>${line.baseRate}</FigureCell>
             <FigureCell>{line.higherRate ? `$${line.higherRate}` : '–'}</FigureCell>
             <TableCell>{payWords(line.quantityKey)}</TableCell>
           </TableRow>

@@ -37,7 +37,7 @@ const figure = (key: string, title: string): GridColumn => ({
 
 /** In the order of a field book; heights of instrument and elevations are worked out between them. */
 export const noteColumns: readonly GridColumn[] = [
-  text('label', 'Point', 150),
+  text('label', 'Point', 200),
   station,
   figure('backsightFt', 'Backsight'),
   figure('intermediateFt', 'Intermediate'),

@@ -63,6 +63,7 @@ export const GridLine = memo(function GridLine(props: GridLineProps) {
         <TableCell sx={{ whiteSpace: 'nowrap', py: '0 !important', pl: '8px !important' }}>
           <Button
             variant="text"
+            sx={{ mr: 4 }}
             aria-label={`Insert a row above row ${index + 1}`}
             onClick={() => acts.insert(index)}
           >

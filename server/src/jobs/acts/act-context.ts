@@ -9,6 +9,8 @@ export type ActOf<Name extends ActName> = Extract<Act, { action: Name }>
 /** From where a person acts, as the server saw it. */
 export interface ActOrigin {
   sessionId: string
+  /** By the link and code that were mailed, and not by a password. */
+  cameByLink: boolean
   remoteAddress: string
   userAgent: string
 }

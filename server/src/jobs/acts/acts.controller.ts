@@ -31,8 +31,9 @@ export class ActsController {
   }
 }
 
-const originOf = ({ sessionId, remoteAddress, userAgent }: Caller) => ({
+const originOf = ({ sessionId, onlyJobId, remoteAddress, userAgent }: Caller) => ({
   sessionId,
+  cameByLink: onlyJobId !== null,
   remoteAddress,
   userAgent,
 })

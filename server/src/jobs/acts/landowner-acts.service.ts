@@ -15,13 +15,15 @@ export class LandownerActs {
 
   async sign(tx: Tx, context: ActContext<'sign'>): Promise<ActEffect> {
     const { packetId, sha256 } = packetAOf(context)
+    const { cameByLink, ...origin } = context.origin
     const { id } = await this.signatures.record(tx, {
       jobId: context.job.id,
       packetId,
       packetSha256: sha256,
       personId: context.actor.personId,
       typedName: context.act.typedName,
-      ...context.origin,
+      method: cameByLink ? 'mailed-link-and-code' : 'password',
+      ...origin,
     })
     return { facts: { signatureId: id, packetSha256: sha256 } }
   }

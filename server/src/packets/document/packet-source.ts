@@ -1,4 +1,5 @@
 import type { DesignPlan, DesignResult, JobInput, SettingValue, SurveyView } from 'shared'
+import type { SignatureMethod } from '../../signatures/signature.entity.js'
 
 export interface PacketProducer {
   name: string
@@ -52,7 +53,7 @@ export interface PacketSource {
   variances: PacketVariance[]
 }
 
-export type SignatureMethod = 'mailed-link-and-code' | 'at-the-table' | 'on-paper'
+export type { SignatureMethod }
 
 export interface PacketSignature {
   /** Of the person the district knows. */

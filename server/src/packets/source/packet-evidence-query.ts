@@ -1,7 +1,7 @@
 import type { PacketEvidence, PacketSignature } from '../document/packet-source.js'
 
 export interface PacketEvidenceRow {
-  signatures: Omit<PacketSignature, 'method'>[]
+  signatures: PacketSignature[]
   technicalCheck: PacketEvidence['technicalCheck']
   approval: PacketEvidence['approval'] | null
 }
@@ -17,6 +17,7 @@ export const packetEvidenceQuery = `
           'name', o.name,
           'typedName', s.typed_name,
           'signedAt', ${instant('s.signed_at')},
+          'method', s.method,
           'consentVersion', k.consent_version,
           'ip', s.remote_address,
           'userAgent', s.user_agent

@@ -20,8 +20,7 @@ export class PacketEvidenceService {
     const { signatures, technicalCheck, approval } = row
     return {
       packetASha256: packetA.sha256,
-      // Every signature comes by a mailed link until there is signing at the table or on paper.
-      signatures: signatures.map((signature) => ({ ...signature, method: 'mailed-link-and-code' })),
+      signatures,
       technicalCheck,
       approval,
       eventChain: head,

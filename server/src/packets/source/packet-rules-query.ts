@@ -33,14 +33,7 @@ export const packetRulesQuery = `
       )
       from payment_schedules s where s.district_id = r.district_id and s.id = any (r.schedule_ids)
     ), '[]') as schedules,
-    coalesce((
-      select jsonb_agg(
-        jsonb_build_object(
-          'key', g.key, 'value', g.value, 'source', g.source, 'sourceDate', ${date('g.source_date')}
-        ) order by g.key
-      )
-      from district_settings g where g.district_id = r.district_id
-    ), '[]') as settings
+    r.settings
   from revisions r
   where r.district_id = $1 and r.id = $2
 `

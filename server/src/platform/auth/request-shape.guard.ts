@@ -31,9 +31,20 @@ export class RequestShapeGuard implements CanActivate {
     if (typeof request.is(wanted) !== 'string') {
       throw new Problem('wrong-media-type', { detail: `Send this as ${wanted}.` })
     }
+    if (isDeeperThan(request.body, deepest)) {
+      throw new Problem('malformed-request', { detail: 'The body is nested too deeply.' })
+    }
     return true
   }
 }
+
+/** No document of ours comes near; what is deeper would only exhaust the stack of whoever walks it. */
+const deepest = 40
+
+const isDeeperThan = (value: unknown, levels: number): boolean =>
+  typeof value === 'object' &&
+  value !== null &&
+  (levels === 0 || Object.values(value).some((part) => isDeeperThan(part, levels - 1)))
 
 const hasContent = (request: Request): boolean =>
   request.get('transfer-encoding') !== undefined || Number(request.get('content-length') ?? 0) > 0

@@ -14,7 +14,10 @@ const byStatus: Record<number, ProblemSlug> = {
 
 /** SQLSTATE codes of PostgreSQL that are no fault of ours. */
 const bySqlState: Record<string, ProblemSlug> = {
+  '22003': 'malformed-request',
+  '22008': 'malformed-request',
   '22021': 'malformed-request',
+  '22P02': 'malformed-request',
   '22P05': 'malformed-request',
   '23505': 'already-exists',
   '40001': 'not-ready',

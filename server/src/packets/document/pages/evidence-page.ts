@@ -5,6 +5,7 @@ import type { PacketEvidence, PacketSignature, SignatureMethod } from '../packet
 
 const methodWords: { readonly [method in SignatureMethod]: string } = {
   'mailed-link-and-code': 'by a mailed link and a mailed code',
+  password: 'signed in with a password',
   'at-the-table': 'on the planner’s tablet, with the planner present',
   'on-paper': 'by hand on paper; the scan is on record',
 }

@@ -94,6 +94,7 @@ export const jobsTables: readonly string[] = [
     criteria_set_id uuid,
     cost_list_id uuid,
     schedule_ids uuid array not null,
+    settings jsonb not null,
     designer_id uuid not null,
     made_by uuid not null,
     made_at timestamptz(3) not null,

@@ -59,6 +59,7 @@ export const packetsTables: readonly string[] = [
     packet_sha256 text not null,
     consent_id uuid not null,
     session_id uuid not null,
+    method text not null,
     remote_address text not null,
     user_agent text not null,
     signed_at timestamptz(3) not null,
