@@ -1,5 +1,5 @@
 import { Body, Controller, Get, Param, Post, Put, Query } from '@nestjs/common'
-import { producerInputSchema, type ProducerInput, type ProducerView } from 'shared'
+import { lineOrEmpty, producerInputSchema, type ProducerInput, type ProducerView } from 'shared'
 import { z } from 'zod'
 import type { Caller } from '../platform/auth/caller.js'
 import { Requires } from '../platform/auth/requires.decorator.js'
@@ -11,7 +11,7 @@ import { SeenVersion } from '../platform/web/seen-version.decorator.js'
 import { Versioned } from '../platform/web/versioned.js'
 import { ProducersService, type VersionedProducer } from './producers.service.js'
 
-const querySchema = z.strictObject({ find: z.string().max(100).default('') })
+const querySchema = z.strictObject({ find: lineOrEmpty(100).default('') })
 
 const answered = ({ version, view }: VersionedProducer) => new Versioned(version, view)
 

@@ -1,4 +1,5 @@
 import Papa from 'papaparse'
+import { numberText } from '../format/number-text.js'
 import { refuseCsv } from './refuse-csv.js'
 
 export interface CsvLine<Column extends string> {
@@ -12,24 +13,29 @@ export interface CsvTableInput<Column extends string> {
   text: string
   /** What the file should hold, for the sentence. */
   content: string
+  mostRows: number
   columnsOf: (header: readonly string[]) => Map<Column, number>
 }
 
 /**
  * The rows under the column names of a CSV file (comma, semicolon or tab). Empty rows are passed over.
  *
- * @throws EngineeringInputError naming `text` when the file as a whole is no such table.
+ * @throws EngineeringInputError naming `text` when the file as a whole is no such table or has more than `mostRows` rows.
  */
 export function csvTable<Column extends string>(input: CsvTableInput<Column>): CsvLine<Column>[] {
   const [header, ...rows] = filledRows(input)
   if (header === undefined) return refuseCsv('The file is empty.')
   const columns = input.columnsOf(header.values)
   if (rows.length === 0) return refuseCsv('The file has column names but no rows under them.')
+  if (rows.length > input.mostRows) return refuseCsv(tooLong(rows.length, input.mostRows))
   return rows.map(({ values, fileRow }) => ({
     fileRow,
     at: (column) => values[columns.get(column) ?? -1]?.trim() ?? '',
   }))
 }
+
+const tooLong = (rows: number, most: number): string =>
+  `The file has ${numberText(rows)} rows under its column names; at most ${numberText(most)} can be read. Leave out the rows that are not needed.`
 
 function filledRows({ text, content }: { text: string; content: string }) {
   if (typeof text !== 'string' || text.includes('\0')) {

@@ -20,6 +20,12 @@ describe('stations', () => {
     expect(parseStation(text)).toBeUndefined()
   })
 
+  it('gives up on a cell of half a million spaces without trying each of them', () => {
+    const from = performance.now()
+    expect(parseStation(`1${' '.repeat(500_000)}2`)).toBeUndefined()
+    expect(performance.now() - from).toBeLessThan(1000)
+  })
+
   it.each([
     [0, 0, '0+00'],
     [5, 0, '0+05'],

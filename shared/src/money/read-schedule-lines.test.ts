@@ -93,6 +93,17 @@ describe('readScheduleLinesCsv', () => {
     ])
   })
 
+  const rowsOf = (count: number) =>
+    Array.from({ length: count }, (_, index) => `A${index},561,Stone,ton,24,,\n`).join('')
+
+  it('reads as many rows as a schedule may have lines, and refuses more before it reads any', () => {
+    const { lines: read, errors } = readScheduleLinesCsv({ text: `${header}\n${rowsOf(2000)}` })
+    expect([read.length, errors]).toEqual([2000, []])
+    expect(refusal(`${header}\n${rowsOf(2001)}`)).toBe(
+      'The file has 2,001 rows under its column names; at most 2,000 can be read. Leave out the rows that are not needed.',
+    )
+  })
+
   it('names every fault of a row at once', () => {
     expect(faults('A,5,Stone,ton,x,y,z').map(([column]) => column)).toEqual([
       'practice',

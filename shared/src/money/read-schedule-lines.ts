@@ -1,6 +1,6 @@
 import { csvTable, type CsvLine } from '../csv/csv-table.js'
 import { quantityKeys } from '../engineering/design/quantity-catalogue.js'
-import { scheduleLineSchema, type ScheduleLine } from '../schemas/schedule.js'
+import { mostScheduleLines, scheduleLineSchema, type ScheduleLine } from '../schemas/schedule.js'
 import { scheduleColumnOf, scheduleColumns, type ScheduleColumn } from './schedule-columns.js'
 
 export interface ScheduleCsvError {
@@ -31,8 +31,14 @@ const UNIQUE = ['code', 'quantity_key'] as const satisfies readonly ScheduleColu
  * @example readScheduleLinesCsv({ text: 'code,practice,title,unit,base_rate\nA1,561,Stone,ton,24.00' }).lines
  */
 export function readScheduleLinesCsv({ text }: { text: string }): ScheduleCsv {
-  const rows = csvTable({ text, content: 'payment schedule', columnsOf: scheduleColumns })
-  const read = rows.map((row, index) => {
+  const rows = csvTable({
+    text,
+    content: 'payment schedule',
+    mostRows: mostScheduleLines,
+    columnsOf: scheduleColumns,
+  })
+  const firstRows = UNIQUE.map((column) => [column, firstRowBy(column, rows)] as const)
+  const read = rows.map((row) => {
     const parsed = scheduleLineSchema.safeParse(cellsOf(row))
     const errors = [
       ...(parsed.error?.issues ?? []).map(({ path, message }) => {
@@ -40,7 +46,7 @@ export function readScheduleLinesCsv({ text }: { text: string }): ScheduleCsv {
         return faultOf(row, column, `${message}.`)
       }),
       ...unknownQuantity(row),
-      ...UNIQUE.flatMap((column) => repeated(row, column, rows.slice(0, index))),
+      ...firstRows.flatMap(([column, firstRow]) => repeated(row, column, firstRow)),
     ]
     return { lines: parsed.success && errors.length === 0 ? [parsed.data] : [], errors }
   })
@@ -69,9 +75,21 @@ function unknownQuantity(row: Row): ScheduleCsvError[] {
   return [faultOf(row, 'quantity_key', `Use one of ${quantityKeys.join(', ')}, or leave it empty.`)]
 }
 
-function repeated(row: Row, column: ScheduleColumn, before: readonly Row[]): ScheduleCsvError[] {
-  const earlier = row.at(column) === '' ? undefined : before.find(({ at }) => at(column) === row.at(column))
-  return earlier ? [faultOf(row, column, `Row ${earlier.fileRow} has it already.`)] : []
+/** The first row of the file with each cell of a column. */
+function firstRowBy(column: ScheduleColumn, rows: readonly Row[]): ReadonlyMap<string, number> {
+  const first = new Map<string, number>()
+  for (const { at, fileRow } of rows) if (!first.has(at(column))) first.set(at(column), fileRow)
+  return first
+}
+
+function repeated(
+  row: Row,
+  column: ScheduleColumn,
+  firstRow: ReadonlyMap<string, number>,
+): ScheduleCsvError[] {
+  const first = firstRow.get(row.at(column))
+  if (row.at(column) === '' || first === undefined || first === row.fileRow) return []
+  return [faultOf(row, column, `Row ${first} has it already.`)]
 }
 
 function faultOf({ fileRow, at }: Row, column: ScheduleColumn, advice: string): ScheduleCsvError {

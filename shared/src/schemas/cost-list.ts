@@ -3,7 +3,7 @@ import type { VersionedStatus } from './criteria.js'
 import { civilDateSchema, lineOfText, rateSchema } from './primitives.js'
 
 export const costLineSchema = z.strictObject({
-  key: z.string().min(1).max(60),
+  key: lineOfText(60),
   low: rateSchema,
   typical: rateSchema,
   high: rateSchema,

@@ -1,5 +1,7 @@
 import { z } from 'zod'
-import { civilDateSchema, lineOfText, paragraph } from './primitives.js'
+import { civilDateSchema, lineOfText, lineOrEmpty, numberBetween, paragraph } from './primitives.js'
+
+const limitFigure = numberBetween(-1e9, 1e9, '')
 
 export const criterionSchema = z.strictObject({
   id: z.string().regex(/^[a-z0-9-]{2,60}$/),
@@ -8,9 +10,9 @@ export const criterionSchema = z.strictObject({
   comparison: z.enum(['at-least', 'at-most', 'between', 'yes']),
   /** The limit: a number, a pair for `between`, or the key of a district setting. */
   limit: z
-    .union([z.number(), z.tuple([z.number(), z.number()]), z.strictObject({ setting: z.string() })])
+    .union([limitFigure, z.tuple([limitFigure, limitFigure]), z.strictObject({ setting: lineOfText(60) })])
     .nullable(),
-  unit: z.string().max(40),
+  unit: lineOrEmpty(40),
   whenMissed: z.enum(['fail', 'caution', 'note']),
   source: lineOfText(300),
   confidence: z.enum(['read', 'memory', 'district-setting', 'common-practice', 'geometry']),

@@ -2,7 +2,7 @@ import { z } from 'zod'
 import { fencePlanSchema } from './fence-plan.js'
 import { fundingPlanSchema } from './funding-plan.js'
 import { elevationFt, stationFt } from './level-notes.js'
-import { lineOfText, numberBetween } from './primitives.js'
+import { lineOfText, numberBetween, planPointSchema } from './primitives.js'
 import { bermPlanSchema, runoffPlanSchema } from './water-plan.js'
 
 export const waterBodies = ['pond', 'lake', 'stream', 'river'] as const
@@ -57,11 +57,7 @@ export const sitePlanSchema = z.strictObject({
   distanceToSpillwayFt: numberBetween(0, 10000, 'ft').optional(),
   distanceToInflowFt: numberBetween(0, 10000, 'ft').optional(),
   soil: lineOfText(80).optional(),
-  waterOutline: z
-    .array(z.strictObject({ eastFt: z.number(), northFt: z.number() }))
-    .min(3)
-    .max(2000)
-    .optional(),
+  waterOutline: z.array(planPointSchema).min(3).max(2000).optional(),
 })
 
 export const rampPlanSchema = z.strictObject({

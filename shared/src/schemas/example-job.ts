@@ -4,7 +4,7 @@ import { designPlanSchema } from './design-plan.js'
 import { jobInputSchema } from './job.js'
 import { elevationFt, levelClosingSchema } from './level-notes.js'
 import { producerInputSchema } from './person.js'
-import { paragraph } from './primitives.js'
+import { lineOfText, numberBetween, paragraph } from './primitives.js'
 import { scheduleInputSchema } from './schedule.js'
 import { settingValueSchema } from './settings.js'
 
@@ -16,7 +16,7 @@ const askedChangeSchema = z.strictObject({
     .array(
       z.strictObject({
         path: z.string().regex(/^(\/[\w-]+)+$/, 'Name the value by its path, such as /ramp/widthFt'),
-        value: z.union([z.number(), z.string(), z.boolean()]),
+        value: z.union([numberBetween(-1e9, 1e9, ''), lineOfText(200), z.boolean()]),
       }),
     )
     .min(1)
@@ -26,7 +26,7 @@ const askedChangeSchema = z.strictObject({
 /** A whole job as a file: what the tour takes. The level notes stand beside it as CSV. */
 export const exampleJobSchema = z.strictObject({
   inputVersion: z.literal(1),
-  settings: z.array(settingValueSchema).min(1),
+  settings: z.array(settingValueSchema).min(1).max(100),
   costList: costListInputSchema,
   schedules: z.array(scheduleInputSchema).min(1).max(8),
   producer: producerInputSchema.required({ email: true }),

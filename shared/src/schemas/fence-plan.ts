@@ -1,13 +1,9 @@
 import { z } from 'zod'
-import { lineOfText, numberBetween } from './primitives.js'
+import { numberText } from '../format/number-text.js'
+import { lineOfText, numberBetween, planPointSchema } from './primitives.js'
 
 const pathSchema = z.union([
-  z.strictObject({
-    points: z
-      .array(z.strictObject({ eastFt: z.number(), northFt: z.number() }))
-      .min(2)
-      .max(500),
-  }),
+  z.strictObject({ points: z.array(planPointSchema).min(2).max(500) }),
   z.strictObject({
     lengthFt: numberBetween(1, 100000, 'ft'),
     startsAt: lineOfText(40).optional(),
@@ -32,15 +28,32 @@ export const fenceRunSchema = z.strictObject({
   wireKind: lineOfText(40),
 })
 
+/** Every point is held against every point of the water, so there is a limit to all runs together. */
+const mostFencePoints = 1000
+
+const pointsOf = ({ path }: z.infer<typeof fenceRunSchema>): number =>
+  'points' in path ? path.points.length : 0
+
+const fenceRunsSchema = z
+  .array(fenceRunSchema)
+  .min(1)
+  .max(50)
+  .refine(
+    (runs) => runs.reduce((sum, run) => sum + pointsOf(run), 0) <= mostFencePoints,
+    `All runs together may have at most ${numberText(mostFencePoints)} points; leave out those on straight stretches`,
+  )
+
 export const fencePlanSchema = z.strictObject({
-  runs: z.array(fenceRunSchema).min(1).max(50),
+  runs: fenceRunsSchema,
   nodes: z
     .array(z.strictObject({ label: lineOfText(40), existing: z.boolean() }))
     .max(100)
     .optional(),
   cornerAngleDeg: numberBetween(1, 90, 'degrees'),
   maxPullFt: numberBetween(50, 5280, 'ft'),
-  rollLengthFt: z.record(z.string().min(1).max(40), numberBetween(50, 20000, 'ft')),
+  rollLengthFt: z
+    .record(lineOfText(40), numberBetween(50, 20000, 'ft'))
+    .refine((kinds) => Object.keys(kinds).length <= 60, 'Name at most 60 kinds of wire'),
   tieOffFt: numberBetween(0, 50, 'ft').optional(),
   wastePercent: numberBetween(0, 50, 'percent'),
   energizerRule: z.enum(['fence-mile', 'hot-wire-mile']),

@@ -2,7 +2,7 @@ import { z } from 'zod'
 import type { OfferedAction } from '../workflow/actions-for.js'
 import { jobStates, type JobState } from '../workflow/states.js'
 import { waterBodySchema } from './design-plan.js'
-import { idSchema, lineOfText } from './primitives.js'
+import { idSchema, lineOfText, lineOrEmpty } from './primitives.js'
 
 export const jobInputSchema = z.strictObject({
   title: lineOfText(120),
@@ -18,8 +18,12 @@ export const jobInputSchema = z.strictObject({
 
 export const jobListQuerySchema = z.strictObject({
   state: z.enum(jobStates).optional(),
-  find: z.string().max(100).optional(),
-  cursor: z.string().max(400).optional(),
+  find: lineOrEmpty(100).optional(),
+  cursor: z
+    .string()
+    .max(400)
+    .regex(/^[\w.=-]*$/, 'Take the cursor as the list before gave it')
+    .optional(),
   limit: z.coerce.number().int().min(1).max(100).optional(),
 })
 

@@ -5,6 +5,9 @@ const readingFt = numberBetween(-30, 60, 'ft')
 export const elevationFt = numberBetween(-1000, 20000, 'ft')
 export const stationFt = numberBetween(-1000, 100000, 'ft')
 
+/** As many as a file may have, too. */
+export const mostLevelNoteRows = 2000
+
 /** One row of a field book, in field order. */
 export const levelNoteRowSchema = z.strictObject({
   label: lineOfText(60),
@@ -35,7 +38,7 @@ export const surveyInputSchema = z.discriminatedUnion('kind', [
     kind: z.literal('level-notes'),
     startElevationFt: elevationFt,
     waterSurfaceFt: elevationFt.optional(),
-    rows: z.array(levelNoteRowSchema).min(2, 'Level notes need at least two rows').max(2000),
+    rows: z.array(levelNoteRowSchema).min(2, 'Level notes need at least two rows').max(mostLevelNoteRows),
     closing: levelClosingSchema.optional(),
   }),
   z.strictObject({

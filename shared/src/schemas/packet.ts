@@ -1,5 +1,14 @@
 import { z } from 'zod'
-import { idSchema, lineOfText, numberBetween, paragraph, sha256Schema } from './primitives.js'
+import {
+  civilDateSchema,
+  idSchema,
+  lineOfText,
+  numberBetween,
+  paragraph,
+  sha256Schema,
+} from './primitives.js'
+
+const pageNumber = z.number().int().min(1).max(200)
 
 export const makePacketSchema = z.strictObject({ designId: idSchema })
 
@@ -23,7 +32,7 @@ export interface PacketView {
 
 export const technicalCheckSchema = z.strictObject({ note: paragraph(2000).optional() })
 
-export const readPageSchema = z.strictObject({ page: z.number().int().min(1).max(200) })
+export const readPageSchema = z.strictObject({ page: pageNumber })
 
 export const consentSchema = z.strictObject({
   consentVersion: z.literal('2026-1'),
@@ -32,7 +41,7 @@ export const consentSchema = z.strictObject({
 
 export const noteInputSchema = z.strictObject({
   packetId: idSchema.optional(),
-  page: z.number().int().min(1).max(200).optional(),
+  page: pageNumber.optional(),
   xMm: numberBetween(0, 2000, 'mm').optional(),
   yMm: numberBetween(0, 2000, 'mm').optional(),
   text: paragraph(4000),
@@ -67,13 +76,13 @@ export const actSchema = z.discriminatedUnion('action', [
   z.strictObject({
     action: z.literal('ask-for-changes'),
     note: reason,
-    page: z.number().int().min(1).optional(),
+    page: pageNumber.optional(),
   }),
   z.strictObject({ action: z.literal('take-signature-back'), reason }),
   z.strictObject({
     action: z.literal('approve'),
     packetSha256: sha256Schema,
-    meetingDate: z.iso.date().optional(),
+    meetingDate: civilDateSchema.optional(),
     agendaItem: lineOfText(60).optional(),
   }),
   z.strictObject({

@@ -13,7 +13,7 @@ export const approvalLimitsSchema = z.strictObject({
 export const personInputSchema = z.strictObject({
   name: lineOfText(120),
   email: emailSchema,
-  roles: z.array(z.enum(roles)).min(1),
+  roles: z.array(z.enum(roles)).min(1).max(roles.length),
   approvalLimits: approvalLimitsSchema.nullable(),
 })
 

@@ -4,6 +4,9 @@ import { civilDateSchema, lineOfText, moneySchema, numberBetween, rateSchema } f
 
 export const sourceKinds = ['unit-rate', 'percent-of-cost', 'fixed'] as const
 
+/** As many as a file may have, too. */
+export const mostScheduleLines = 2000
+
 export const scheduleLineSchema = z.strictObject({
   code: lineOfText(40),
   practice: z.string().regex(/^\d{3}$/, 'A practice has a number of three digits'),
@@ -13,7 +16,7 @@ export const scheduleLineSchema = z.strictObject({
   baseRate: rateSchema,
   higherRate: rateSchema.optional(),
   /** The line of our bill of quantities that this line pays; null while nobody has mapped it. */
-  quantityKey: z.string().min(1).max(60).nullable(),
+  quantityKey: lineOfText(60).nullable(),
 })
 
 export const scheduleInputSchema = z.strictObject({
@@ -33,14 +36,14 @@ export const scheduleInputSchema = z.strictObject({
     .array(z.string().regex(/^\d{3}$/))
     .max(30)
     .optional(),
-  lines: z.array(scheduleLineSchema).max(2000),
+  lines: z.array(scheduleLineSchema).max(mostScheduleLines),
 })
 
 export const mapScheduleLinesSchema = z.strictObject({
   mapping: z
-    .array(z.strictObject({ code: lineOfText(40), quantityKey: z.string().min(1).max(60).nullable() }))
+    .array(z.strictObject({ code: lineOfText(40), quantityKey: lineOfText(60).nullable() }))
     .min(1)
-    .max(2000),
+    .max(mostScheduleLines),
 })
 
 export type ScheduleLine = z.infer<typeof scheduleLineSchema>

@@ -1,19 +1,16 @@
 import { z } from 'zod'
 import type { Role } from '../workflow/roles.js'
-import { emailSchema, idSchema } from './primitives.js'
+import { emailSchema, idSchema, typedSecret } from './primitives.js'
 
-const passwordSchema = z
-  .string()
-  .min(15, 'Use at least 15 characters; a sentence you can remember is good')
-  .max(256, 'Use at most 256 characters')
+const passwordSchema = typedSecret(15, 'Use at least 15 characters; a sentence you can remember is good')
 
 export const signInSchema = z.strictObject({
   email: emailSchema,
-  password: z.string().min(1, 'Type your password').max(256, 'Use at most 256 characters'),
+  password: typedSecret(1, 'Type your password'),
 })
 
 export const changePasswordSchema = z.strictObject({
-  currentPassword: z.string().min(1, 'Type the password you use now').max(256),
+  currentPassword: typedSecret(1, 'Type the password you use now'),
   newPassword: passwordSchema,
 })
 

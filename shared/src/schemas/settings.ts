@@ -1,10 +1,10 @@
 import { z } from 'zod'
-import { civilDateSchema, lineOfText } from './primitives.js'
+import { civilDateSchema, lineOfText, numberBetween } from './primitives.js'
 
 /** One engineering setting of a district. An empty value means: not entered yet. */
 export const settingValueSchema = z.strictObject({
-  key: z.string().min(1).max(60),
-  value: z.number().nullable(),
+  key: lineOfText(60),
+  value: numberBetween(-1e9, 1e9, '').nullable(),
   source: lineOfText(200),
   sourceDate: civilDateSchema,
 })

@@ -24,6 +24,32 @@ describe('parseLevelNotesCsv', () => {
     expect(parseLevelNotesCsv({ text })).toEqual(rows)
   })
 
+  it('reads as many rows as level notes may have, and refuses more as a whole', () => {
+    const rowsOf = (count: number) => `label,bs\n${'a,1.5\n'.repeat(count)}`
+    expect(readLevelNotesCsv({ text: rowsOf(2000) }).rows).toHaveLength(2000)
+    expect(refusal(rowsOf(2001))).toContain(
+      'has 2,001 rows under its column names; at most 2,000 can be read',
+    )
+  })
+
+  it.each([
+    ['5.', 5],
+    ['.5', 0.5],
+    ['-1.25', -1.25],
+    ['+4', 4],
+  ])('reads the figure %s as %d', (written, figure) => {
+    expect(readLevelNotesCsv({ text: `label,bs\na,${written}` }).rows).toEqual([
+      { label: 'a', backsightFt: figure },
+    ])
+  })
+
+  it('gives up on a figure of half a million digits without trying each of them', () => {
+    const from = performance.now()
+    const { errors } = readLevelNotesCsv({ text: `label,bs\na,${'1'.repeat(500_000)}x` })
+    expect(errors.map(({ column }) => column)).toEqual(['bs'])
+    expect(performance.now() - from).toBeLessThan(1000)
+  })
+
   it.each([
     ['semicolons', text.replaceAll(',', ';')],
     ['tabs', text.replaceAll(',', '\t')],

@@ -1,10 +1,12 @@
 import { csvTable } from '../../csv/csv-table.js'
 import { refuseCsv } from '../../csv/refuse-csv.js'
 import { parseStation } from '../../format/parse-station.js'
+import { mostLevelNoteRows } from '../../schemas/level-notes.js'
 import { type LevelNotesColumn, levelNotesColumns } from './level-notes-columns.js'
 import type { LevelRow } from './reduce-level-notes.js'
 
-const NUMBER = /^[+-]?(\d+\.?\d*|\.\d+)$/
+/** Each digit can be read in one way only: a cell of a million digits must not be tried in as many ways. */
+const NUMBER = /^[+-]?(\d+(\.\d*)?|\.\d+)$/
 const MOST_SENTENCES = 10
 
 interface Figure {
@@ -57,7 +59,12 @@ export interface LevelNotesCsv {
  */
 export function readLevelNotesCsv({ text }: { text: string }): LevelNotesCsv {
   const errors: LevelNotesCsvError[] = []
-  const lines = csvTable({ text, content: 'level notes', columnsOf: levelNotesColumns })
+  const lines = csvTable({
+    text,
+    content: 'level notes',
+    mostRows: mostLevelNoteRows,
+    columnsOf: levelNotesColumns,
+  })
   const rows = lines.map(({ at, fileRow }): LevelRow => {
     const row: LevelRow = { label: at('label') || at('station') || `row ${fileRow}` }
     for (const { column, key, read, example } of FIGURES) {

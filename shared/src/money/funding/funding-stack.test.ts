@@ -161,6 +161,20 @@ describe('fundingStack', () => {
     expect(() => stack([source])).toThrowError(expect.objectContaining({ field }))
   })
 
+  it('refuses a fund that is named twice, since it would pay twice and pass its cap', () => {
+    const fund: FundingSource = {
+      key: 'C',
+      name: 'Creek fund',
+      kind: 'fixed',
+      amount: '900.00',
+      cap: '500.00',
+    }
+    expect(stack([fund]).totalPaid).toBe('500.00')
+    expect(() => stack([fund, a, { ...fund, personLimitRemaining: '100.00' }])).toThrowError(
+      expect.objectContaining({ field: 'C', message: expect.stringMatching(/^Creek fund is named twice/) }),
+    )
+  })
+
   it('refuses a stack limit above 100', () => {
     expect(() => stack([a], { stackLimitPercent: 101 })).toThrowError(
       expect.objectContaining({ field: 'stackLimitPercent' }),

@@ -1,3 +1,4 @@
+import { EngineeringInputError } from '../../engineering/engineering-input-error.js'
 import { requireNumber } from '../../engineering/require-number.js'
 import type { Money } from '../../schemas/primitives.js'
 import { Exact, exactSum } from '../exact.js'
@@ -33,9 +34,11 @@ export interface FundingStackInput {
  *
  * Source of the 100 percent limit: 7 CFR 1465.23(a)(3); Wis. Adm. Code ATCP 50.42.
  *
- * @throws EngineeringInputError for an amount that is no decimal text or a percent outside 0 to 100.
+ * @throws EngineeringInputError for a source that stands there twice, an amount that is no decimal text or a percent
+ *   outside 0 to 100.
  */
 export function fundingStack(input: FundingStackInput): FundingResult {
+  refuseRepeated(input.sources)
   const rule = stackRule(input)
   const funded: FundedSource[] = []
   let paid: PaidSoFar = { total: new Exact(0), byPractice: new Map(), byGroup: new Map() }
@@ -52,6 +55,16 @@ export function fundingStack(input: FundingStackInput): FundingResult {
     landownerShare: subtractMoney(cost, totalPaid),
     perPractice: perPractice(rule.lines, paid),
   }
+}
+
+/** A cap and a person's limit hold for all that one fund pays, so a fund pays in one place. */
+function refuseRepeated(sources: readonly FundingSource[]): void {
+  const keys = sources.map(({ key }) => key)
+  const repeated = sources.find(({ key }, index) => keys.indexOf(key) < index)
+  if (!repeated) return
+  const { key, name } = repeated
+  const message = `${name ?? key} is named twice among the funds of this design. Name it once; its cap holds for all that it pays.`
+  throw new EngineeringInputError({ field: key, message })
 }
 
 function stackRule({ lines, cost, stackLimitPercent, stackScope }: FundingStackInput): StackRule {
