@@ -1,6 +1,6 @@
 import { keepPreviousData, queryOptions, useMutation, useQueryClient } from '@tanstack/react-query'
 import type { PersonInput, PersonView, ProducerInput, ProducerView } from 'shared'
-import { request } from './request'
+import { request, requestVersioned } from './request'
 
 export const peopleQuery = queryOptions({
   queryKey: ['people'],
@@ -29,5 +29,25 @@ export function useAddProducer() {
   return useMutation({
     mutationFn: (body: ProducerInput) => request<ProducerView>('/producers', { method: 'POST', body }),
     onSuccess: () => queries.invalidateQueries({ queryKey: ['producers'] }),
+  })
+}
+
+export const producerQuery = (id: string) =>
+  queryOptions({
+    queryKey: ['producer', id],
+    queryFn: ({ signal }) => requestVersioned<ProducerView>(`/producers/${id}`, { signal }),
+  })
+
+export function useSaveProducer(id: string) {
+  const queries = useQueryClient()
+  return useMutation({
+    mutationFn: ({ body, version }: { body: ProducerInput; version: number }) =>
+      requestVersioned<ProducerView>(`/producers/${id}`, { method: 'PUT', body, version }),
+    onSuccess: async (saved) => {
+      queries.setQueryData(producerQuery(id).queryKey, saved)
+      await queries.invalidateQueries({ queryKey: ['producers'] })
+      // A job shows the names and addresses of its producers.
+      await queries.invalidateQueries({ queryKey: ['jobs'] })
+    },
   })
 }

@@ -38,8 +38,12 @@ const readJson = async (response: Response): Promise<unknown> => {
   }
 }
 
-/** The one way to the server. Resolves with the body, rejects with a ProblemError. */
-export async function request<T>(path: string, options: RequestOptions = {}): Promise<T> {
+interface Answer {
+  body: unknown
+  headers: Headers
+}
+
+async function answerOf(path: string, options: RequestOptions): Promise<Answer> {
   let response: Response
   let body: unknown
   try {
@@ -55,8 +59,25 @@ export async function request<T>(path: string, options: RequestOptions = {}): Pr
     if (options.signal?.aborted) throw cause
     throw noConnection()
   }
-  if (response.ok) return body as T
+  if (response.ok) return { body, headers: response.headers }
   const problem = parseProblem(response.status, body)
   if (problem.slug === 'not-signed-in') sessionExpired.raise()
   throw problem
+}
+
+/** The one way to the server. Resolves with the body, rejects with a ProblemError. */
+export async function request<T>(path: string, options: RequestOptions = {}): Promise<T> {
+  const { body } = await answerOf(path, options)
+  return body as T
+}
+
+export interface Versioned<T> {
+  version: number
+  view: T
+}
+
+/** For a document whose version is told beside it, in the ETag. */
+export async function requestVersioned<T>(path: string, options: RequestOptions = {}): Promise<Versioned<T>> {
+  const { body, headers } = await answerOf(path, options)
+  return { version: Number(/"v(\d+)"/.exec(headers.get('ETag') ?? '')?.[1]), view: body as T }
 }

@@ -12,11 +12,12 @@ export interface CsvRowError {
 
 const surveyKey = (jobId: string) => ['jobs', jobId, 'survey'] as const
 
-/** Null when the job has no survey yet. */
-export const surveyQuery = (jobId: string) =>
+/** Null when the job has no survey yet; where the job says so, nothing is asked. */
+export const surveyQuery = (jobId: string, hasSurvey = true) =>
   queryOptions({
     queryKey: surveyKey(jobId),
     queryFn: async ({ signal }): Promise<SurveyView | null> => {
+      if (!hasSurvey) return null
       try {
         return await request<SurveyView>(`/jobs/${jobId}/survey`, { signal })
       } catch (error) {

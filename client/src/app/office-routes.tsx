@@ -39,4 +39,8 @@ export const officeRoutes: RouteObject[] = [
     path: 'producers/new',
     lazy: async () => ({ Component: (await import('../pages/new-producer-page')).NewProducerPage }),
   },
+  {
+    path: 'producers/:producerId',
+    lazy: async () => ({ Component: (await import('../pages/producer-page')).ProducerPage }),
+  },
 ]

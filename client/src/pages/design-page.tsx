@@ -36,7 +36,7 @@ export function DesignPage() {
 function PartOfDesign({ job, design }: { job: JobView; design: DesignView }) {
   const { part = '' } = useParams()
   const lock = useJobFrameLock(job, 'design:write')
-  const survey = useQuery(surveyQuery(job.id))
+  const survey = useQuery(surveyQuery(job.id, job.hasSurvey))
   const spec = partSpec(part)
   if (spec === undefined) return <Navigate to={`/jobs/${job.id}/design`} replace />
   return (

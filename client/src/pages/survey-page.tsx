@@ -22,7 +22,7 @@ export function SurveyPage() {
 
 function SurveyOfJob({ job }: { job: JobView }) {
   const lock = useJobFrameLock(job, 'survey:write')
-  const query = useQuery(surveyQuery(job.id))
+  const query = useQuery(surveyQuery(job.id, job.hasSurvey))
   return (
     <>
       {lock !== null && <Typography sx={{ my: 2 }}>{lock}</Typography>}

@@ -16,6 +16,18 @@ const revision = ({ facts }: EventWords): string => `revision ${String(facts['re
 const counted = (count: unknown, one: string, many: string): string =>
   count === 1 ? `1 ${one}` : `${typeof count === 'number' ? count : 0} ${many}`
 
+/** Each kind of letter in a few words; whom it went to stands in the list of mail. */
+const letterWords: Readonly<Record<string, string>> = {
+  'entry-link': 'The link to the packet',
+  'entry-code': 'A code for the mailed link',
+  returned: 'The notice that the job is returned',
+  signed: 'The notice that the packet is signed',
+  approved: 'The notice that the packet is approved',
+  packet: 'The approved packet',
+}
+
+const letterIn = ({ facts }: EventWords): string => letterWords[String(facts['mailKind'])] ?? 'A message'
+
 /** An act of the workflow is recorded under its own name, so that edge and event cannot drift apart. */
 const actSentences: Record<JobAction, Sentence> = {
   'send-to-landowner': (e) => `${e.who} sent ${revision(e)} to the landowner.`,
@@ -67,8 +79,8 @@ const otherSentences = {
   'note-settled': (e) => `${e.who} settled a note.`,
   'mail-again': (e) => `${e.who} put a message in the post again.`,
   'link-again': (e) => `${e.who} sent the link to the landowner again.`,
-  'mail-sent': () => 'A message went out.',
-  'mail-failed': () => 'A message could not be delivered.',
+  'mail-sent': (e) => `${letterIn(e)} went out.`,
+  'mail-failed': (e) => `${letterIn(e)} could not be delivered.`,
 } as const satisfies Record<string, Sentence>
 
 export const eventSentences: Readonly<Record<string, Sentence>> = { ...actSentences, ...otherSentences }

@@ -60,14 +60,14 @@ describe('readScheduleLinesCsv', () => {
   })
 
   it.each([
-    ['A,56,Stone,ton,24.00,,', 'practice', /Row 2, column practice is "56"\..*three digits/],
-    ['A,561,Stone,ton,"24,5",,', 'base_rate', /column base_rate is "24,5"\. Give a rate in dollars/],
-    ['A,561,Stone,ton,,,', 'base_rate', /column base_rate is empty\. Give a rate in dollars/],
+    ['A,56,Stone,ton,24.00,,', 'practice', /Row 2, column "practice" is "56"\..*three digits/],
+    ['A,561,Stone,ton,"24,5",,', 'base_rate', /column "base_rate" is "24,5"\. Give a rate in dollars/],
+    ['A,561,Stone,ton,,,', 'base_rate', /column "base_rate" is empty\. Give a rate in dollars/],
     ['A,561,Stone,ton,-3,,', 'base_rate', /is "-3"/],
     ['A,561,Stone,ton,24.12345,,', 'base_rate', /up to four places/],
-    ['A,561,Stone,ton,24,x,', 'higher_rate', /column higher_rate is "x"/],
-    [',561,Stone,ton,24,,', 'code', /column code is empty\. This must not be empty/],
-    ['A,561,,ton,24,,', 'title', /column title is empty/],
+    ['A,561,Stone,ton,24,x,', 'higher_rate', /column "higher_rate" is "x"/],
+    [',561,Stone,ton,24,,', 'code', /column "code" is empty\. This must not be empty/],
+    ['A,561,,ton,24,,', 'title', /column "title" is empty/],
     [
       'A,561,Stone,ton,24,,gravel',
       'quantity_key',
@@ -84,11 +84,11 @@ describe('readScheduleLinesCsv', () => {
     })
     expect(read.map(({ title }) => title)).toEqual(['Surface stone, in place'])
     expect(errors).toEqual([
-      { row: 3, column: 'code', message: 'Row 3, column code is "SB-01". Row 2 has it already.' },
+      { row: 3, column: 'code', message: 'Row 3, column "code" is "SB-01". Row 2 has it already.' },
       {
         row: 5,
         column: 'quantity_key',
-        message: 'Row 5, column quantity_key is "stone-surface". Row 2 has it already.',
+        message: 'Row 5, column "quantity_key" is "stone-surface". Row 2 has it already.',
       },
     ])
   })

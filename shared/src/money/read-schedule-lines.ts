@@ -94,5 +94,5 @@ function repeated(
 
 function faultOf({ fileRow, at }: Row, column: ScheduleColumn, advice: string): ScheduleCsvError {
   const written = at(column) === '' ? 'is empty' : `is "${at(column)}"`
-  return { row: fileRow, column, message: `Row ${fileRow}, column ${column} ${written}. ${advice}` }
+  return { row: fileRow, column, message: `Row ${fileRow}, column "${column}" ${written}. ${advice}` }
 }

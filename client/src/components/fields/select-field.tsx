@@ -16,10 +16,11 @@ interface SelectFieldProps extends FieldWords {
   isOptional?: boolean
 }
 
-export function SelectField({ name, label, hint, unit, choices, emptyLabel, isOptional }: SelectFieldProps) {
+export function SelectField({ name, choices, emptyLabel, isOptional, ...words }: SelectFieldProps) {
+  const { label, hint } = words
   const { id, field, error } = useField(name, label)
   return (
-    <FieldFrame id={id} label={label} hint={hint} unit={unit} error={error} isOptional={isOptional}>
+    <FieldFrame id={id} {...words} error={error} isOptional={isOptional}>
       <NativeSelect
         input={<InputBase />}
         id={id}

@@ -19,7 +19,7 @@ export function PriceRow({ quantity, index }: PriceRowProps) {
   const { description, unit } = quantityCatalogue[quantity]
   return (
     <TableRow>
-      <TableCell component="th" scope="row">
+      <TableCell component="th" scope="row" sx={{ verticalAlign: 'middle' }}>
         {description}
       </TableCell>
       {prices.map(({ name, label }) => (

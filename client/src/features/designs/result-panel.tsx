@@ -41,7 +41,9 @@ export function ResultPanel({ resultKey, result, part, designPath, isBegun }: Re
     return (
       <Section
         title={title}
-        aside={isBegun ? <VerdictMark kind="fail" words="needs another look" /> : <VerdictMark kind="waiting" />}
+        aside={
+          isBegun ? <VerdictMark kind="fail" words="needs another look" /> : <VerdictMark kind="waiting" />
+        }
       >
         <Typography sx={{ mt: 2 }}>{found.message}</Typography>
         <WayToField field={found.field} part={part} designPath={designPath} />

@@ -25,7 +25,12 @@ export function NewJobForm({ producerIds, onMade }: NewJobFormProps) {
     county: '',
   })
   const { setValue } = form
-  useEffect(() => setValue('producerIds', producerIds), [setValue, producerIds])
+  // Looked at anew once somebody has pressed: the sentence that asked for a producer goes when there is one.
+  const { isSubmitted } = form.formState
+  useEffect(
+    () => setValue('producerIds', producerIds, { shouldValidate: isSubmitted }),
+    [setValue, producerIds, isSubmitted],
+  )
   return (
     <Form
       form={form}

@@ -15,7 +15,7 @@ export function NotNow({ job, title, sentence }: NotNowProps) {
   const { t } = useTranslation()
   return (
     <EmptyState title={title} action={<LinkButton to={`/my/${job.id}`} words={t('sign.doneAgain')} isMain />}>
-      {sentence ?? t('job.notYourTurn', { state: t(`states.${job.state}`) })}
+      {sentence ?? t('job.whereItStands', { state: t(`states.${job.state}`) })}
     </EmptyState>
   )
 }

@@ -11,7 +11,11 @@ export function RoleChoice() {
   const { id, field, error } = useField('roles', 'Roles')
   const chosen: readonly Role[] = Array.isArray(field.value) ? field.value : []
   return (
-    <Box component="fieldset" sx={{ border: 0, p: 0, m: 0, minWidth: 0 }} aria-describedby={error && errorId(id)}>
+    <Box
+      component="fieldset"
+      sx={{ border: 0, p: 0, m: 0, minWidth: 0 }}
+      aria-describedby={error && errorId(id)}
+    >
       <Typography component="legend" sx={{ fontWeight: 600, p: 0 }}>
         Roles
       </Typography>

@@ -4,7 +4,7 @@ import { CsvErrors } from './csv-errors'
 
 describe('faults of a CSV file', () => {
   it('stand by row and column, each with what would be right', () => {
-    const message = 'Row 3, column base_rate is "abc". Give a rate in dollars.'
+    const message = 'Row 3, column "base_rate" is "abc". Give a rate in dollars.'
     render(<CsvErrors errors={[{ row: 3, column: 'base_rate', message }]} />)
     const [, row] = screen.getAllByRole('row')
     expect(row).toHaveTextContent(`3base_rate${message}`)

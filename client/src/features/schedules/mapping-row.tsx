@@ -28,6 +28,7 @@ export function MappingRow({ line, index }: MappingRowProps) {
           label={`${line.code} pays for`}
           choices={quantityChoices}
           emptyLabel="nothing of ours"
+          isLabelHidden
         />
       </TableCell>
     </TableRow>

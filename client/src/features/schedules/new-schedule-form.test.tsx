@@ -13,7 +13,7 @@ const line = {
   baseRate: '21.50',
   quantityKey: null,
 }
-const message = 'Row 3, column base_rate is "abc". Give a rate in dollars.'
+const message = 'Row 3, column "base_rate" is "abc". Give a rate in dollars.'
 const answers: Record<string, unknown> = {
   '/api/schedules/read-csv': { lines: [line], errors: [{ row: 3, column: 'base_rate', message }] },
   '/api/schedules': { id: 's1' },

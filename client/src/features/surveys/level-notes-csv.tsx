@@ -18,7 +18,7 @@ export function LevelNotesCsv({ onRead }: LevelNotesCsvProps) {
   const input = useRef<HTMLInputElement>(null)
 
   const take = (file: File | undefined) => {
-    if (file === undefined) return
+    if (file === undefined || read.isPending) return
     read.mutate(file, { onSuccess: ({ rows }) => onRead(writeRows(noteColumns, rows)) })
     // The same file can be chosen again after it was mended.
     if (input.current) input.current.value = ''
@@ -27,17 +27,18 @@ export function LevelNotesCsv({ onRead }: LevelNotesCsvProps) {
   const count = read.data?.rows.length ?? 0
   return (
     <Box sx={{ mt: 3 }}>
-      <Button component="label" aria-disabled={read.isPending}>
+      <Button aria-disabled={read.isPending} onClick={() => input.current?.click()}>
         {read.isPending ? 'Reading…' : 'Read a CSV file'}
-        <input
-          ref={input}
-          type="file"
-          accept=".csv,text/csv,text/plain"
-          className="visually-hidden"
-          aria-label="CSV file of level notes"
-          onChange={(event) => take(event.target.files?.[0])}
-        />
       </Button>
+      <input
+        ref={input}
+        type="file"
+        accept=".csv,text/csv,text/plain"
+        className="visually-hidden"
+        tabIndex={-1}
+        aria-label="CSV file of level notes"
+        onChange={(event) => take(event.target.files?.[0])}
+      />
       <Typography variant="body2" sx={{ color: 'text.secondary', mt: 1 }}>
         First row: label, station, bs, is, fs, water_depth. The file takes the place of the rows above.
       </Typography>

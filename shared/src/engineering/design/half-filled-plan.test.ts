@@ -29,7 +29,7 @@ const places = planned.flatMap((part) => placesIn(workedPlan[part], [part]))
 
 const left = Symbol('left out')
 /** What a form holds while somebody types. */
-const halfTyped = [left, undefined, null, Number.NaN, '', 0, -1, 1e15, 'abc', [], {}] as const
+const halfTyped = [left, undefined, null, Number.NaN, '', 0, -1, 0.5, 1e15, 'abc', [], {}] as const
 
 function withEmptied(emptied: readonly (readonly [Path, unknown])[]): DesignInput {
   const input: DesignInput = structuredClone(workedInput)

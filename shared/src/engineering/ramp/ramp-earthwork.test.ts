@@ -191,7 +191,7 @@ describe('rampEarthwork', () => {
     expect(() => earthwork({ groundLine: short })).toThrow(
       expect.objectContaining({
         field: 'groundLine',
-        message: 'survey ends at station 100; it must reach at least station 102.358',
+        message: 'The survey ends at station 100; it must reach at least station 102.358.',
       }),
     )
   })

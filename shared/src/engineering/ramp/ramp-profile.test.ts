@@ -174,7 +174,7 @@ describe('rampProfile', () => {
     expect(() => profile({ groundLine: groundLine.slice(0, 9) })).toThrow(
       expect.objectContaining({
         field: 'groundLine',
-        message: 'survey ends at station 85; it must reach at least station 99.6',
+        message: 'The survey ends at station 85; it must reach at least station 99.6.',
       }),
     )
   })
@@ -182,7 +182,7 @@ describe('rampProfile', () => {
   it('says how far landward the survey must begin when the approach runs off it', () => {
     expect(() =>
       profile({ groundLine: groundLine.slice(3), rampTopStationFt: 42.5, approachGradeRunPerRise: 5 }),
-    ).toThrow(/^survey begins at station 42; it must reach at least station 40\.667$/)
+    ).toThrow(/^The survey begins at station 42; it must reach at least station 40\.667\.$/)
   })
 
   it.each<[Partial<RampProfileInput>, string]>([

@@ -10,10 +10,10 @@ interface SurveyReach {
 
 /** The one sentence for a survey that is too short. */
 export function surveyReachError({ stationFt, neededStationFt, toward }: SurveyReach): EngineeringInputError {
-  const start = `survey ${toward === 'water' ? 'ends' : 'begins'} at station ${forWords(stationFt)}`
+  const start = `The survey ${toward === 'water' ? 'ends' : 'begins'} at station ${forWords(stationFt)}`
   const message =
     neededStationFt === undefined
       ? `${start}, and its last slope never meets the earthwork; choose another grade or side slope.`
-      : `${start}; it must reach at least station ${forWords(neededStationFt)}`
+      : `${start}; it must reach at least station ${forWords(neededStationFt)}.`
   return new EngineeringInputError({ field: 'groundLine', message })
 }

@@ -79,9 +79,9 @@ describe('parseLevelNotesCsv', () => {
 
   it('names row and column of every figure that is no number', () => {
     const message = refusal('label,station,bs,is,fs\nBM,,4.8b,,\n,,,,\nA,2+x,,"6,46",')
-    expect(message).toContain('Row 2, column bs: "4.8b" is not a number such as 4.86.')
-    expect(message).toContain('Row 4, column station: "2+x" is not a number such as 0+42 or 42.')
-    expect(message).toContain('Row 4, column is: "6,46" is not a number such as 5.86.')
+    expect(message).toContain('Row 2, column "bs": "4.8b" is not a number such as 4.86.')
+    expect(message).toContain('Row 4, column "station": "2+x" is not a number such as 0+42 or 42.')
+    expect(message).toContain('Row 4, column "is": "6,46" is not a number such as 5.86.')
   })
 
   it('shows ten bad figures and counts the rest', () => {
@@ -115,7 +115,7 @@ describe('a field book read for a form', () => {
       { label: '0+20', stationFt: 20, intermediateFt: 6.46 },
     ])
     expect(errors).toEqual([
-      { row: 3, column: 'is', message: 'Row 3, column is: "x" is not a number such as 5.86.' },
+      { row: 3, column: 'is', message: 'Row 3, column "is": "x" is not a number such as 5.86.' },
     ])
   })
 

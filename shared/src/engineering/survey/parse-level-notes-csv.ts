@@ -72,7 +72,7 @@ export function readLevelNotesCsv({ text }: { text: string }): LevelNotesCsv {
       if (written === '') continue
       const figure = read(written)
       if (figure === undefined) {
-        const message = `Row ${fileRow}, column ${column}: "${written}" is not a number such as ${example}.`
+        const message = `Row ${fileRow}, column "${column}": "${written}" is not a number such as ${example}.`
         errors.push({ row: fileRow, column, message })
       } else row[key] = figure
     }
