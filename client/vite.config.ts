@@ -11,7 +11,9 @@ export default defineConfig({
     strictPort: true,
     proxy: { '/api': process.env.API_ADDRESS ?? 'http://127.0.0.1:3000' },
   },
+  logLevel: 'warn',
   build: {
+    chunkSizeWarningLimit: 600,
     target: 'es2022',
     // shared is pure, so what a page does not use of it is left out of its file.
     rolldownOptions: {
