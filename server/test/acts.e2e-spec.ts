@@ -165,6 +165,7 @@ describe('a job with its landowner', () => {
   it('is not signed without a name or without meaning it', async () => {
     for (const [change, pointer] of [
       [{ typedName: '  ' }, '/typedName'],
+      [{ typedName: 'Somebody Else' }, '/typedName'],
       [{ intends: false }, '/intends'],
       [{ packetSha256: 'short' }, '/packetSha256'],
     ] as const) {

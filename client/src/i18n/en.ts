@@ -106,6 +106,7 @@ export const en = {
     funds: 'The funds pay',
     share: 'Left to you, about',
     nameMissing: 'Type your full name',
+    nameOther: 'Type your name as it stands on the packet: {{name}}',
     notNow: 'There is nothing to sign now',
     name: 'Type your full name',
     nameHint: 'As it stands on the packet: {{name}}',

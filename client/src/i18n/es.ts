@@ -108,6 +108,7 @@ export const es: Catalogue = {
     funds: 'Los fondos pagan',
     share: 'Le queda a usted, cerca de',
     nameMissing: 'Escriba su nombre completo',
+    nameOther: 'Escriba su nombre como está en el expediente: {{name}}',
     notNow: 'Ahora no hay nada que firmar',
     name: 'Escriba su nombre completo',
     nameHint: 'Como está en el expediente: {{name}}',

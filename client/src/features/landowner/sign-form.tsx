@@ -2,7 +2,7 @@ import Box from '@mui/material/Box'
 import Typography from '@mui/material/Typography'
 import { useWatch } from 'react-hook-form'
 import { useTranslation } from 'react-i18next'
-import type { JobView, PacketView } from 'shared'
+import { isOwnName, type JobView, type PacketView } from 'shared'
 import { useAct } from '../../api/jobs'
 import { useSession } from '../../api/session-context'
 import { ActButton } from '../../components/feedback/act-button'
@@ -28,9 +28,13 @@ export function SignForm({ job, packet, onSigned }: SignFormProps) {
   const stepReasons = useStepReasons()
   const form = useActForm({ action: 'sign', typedName: '', packetSha256: packet.sha256 ?? '' })
   const [typedName, intends] = useWatch({ control: form.control, name: ['typedName', 'intends'] })
+  const nameReasons = (typed: string): string[] => {
+    if (typed.trim() === '') return [t('sign.nameMissing')]
+    return isOwnName(typed, name) ? [] : [t('sign.nameOther', { name })]
+  }
   const reasons = [
     ...stepReasons(signingSteps(job, packet)),
-    ...(typedName?.trim() ? [] : [t('sign.nameMissing')]),
+    ...nameReasons(typedName ?? ''),
     ...(intends ? [] : [t('sign.must')]),
   ]
   const sign = form.handleSubmit(async (values) => {

@@ -1,4 +1,6 @@
 import { Injectable } from '@nestjs/common'
+import { isOwnName, Problem } from 'shared'
+import { Person } from '../../accounts/person.entity.js'
 import type { Tx } from '../../platform/database/tx.js'
 import { SignaturesService } from '../../signatures/signatures.service.js'
 import type { ActContext, ActEffect } from './act-context.js'
@@ -15,6 +17,7 @@ export class LandownerActs {
 
   async sign(tx: Tx, context: ActContext<'sign'>): Promise<ActEffect> {
     const { packetId, sha256 } = packetAOf(context)
+    await this.refuseOtherName(tx, context)
     const { cameByLink, ...origin } = context.origin
     const { id } = await this.signatures.record(tx, {
       jobId: context.job.id,
@@ -26,6 +29,13 @@ export class LandownerActs {
       ...origin,
     })
     return { facts: { signatureId: id, packetSha256: sha256 } }
+  }
+
+  private async refuseOtherName(tx: Tx, { act, actor }: ActContext<'sign'>): Promise<void> {
+    const { name } = await tx.manager.findOneByOrFail(Person, { id: actor.personId })
+    if (isOwnName(act.typedName, name)) return
+    const message = `Type your name as it stands on the packet: ${name}.`
+    throw new Problem('invalid-fields', { detail: message, fields: [{ pointer: '/typedName', message }] })
   }
 
   async askForChanges(tx: Tx, context: ActContext<'ask-for-changes'>): Promise<ActEffect> {
