@@ -78,7 +78,7 @@ describe('a message', () => {
     const events = (await district.planner.api.get(`/jobs/${walked.job.id}/events`)).body
     expect(events.at(-1)).toMatchObject({
       kind: 'mail-failed',
-      sentence: 'A message could not be delivered.',
+      sentence: 'The link to the packet could not be delivered.',
     })
   })
 })

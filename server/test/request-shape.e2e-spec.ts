@@ -130,7 +130,7 @@ describe('a request that reads', () => {
     const answers: [string, ProblemSlug][] = [
       ['/nothing', 'not-found'],
       ['/jobs/x/y/z', 'not-found'],
-      ['/producers?find=%00', 'malformed-request'],
+      ['/producers?find=%00', 'invalid-fields'],
       ['/jobs?limit=many', 'invalid-fields'],
       ['/jobs?unknown=1', 'invalid-fields'],
       ['/jobs?cursor=forged', 'malformed-request'],
