@@ -6,6 +6,7 @@ import { runFolder } from './e2e/support/sign-ins'
 export default defineConfig({
   testDir: 'e2e',
   outputDir: join(runFolder, 'browser-tests'),
+  // One at a time: some stories put other rules in force, and what others rest on would change under them.
   workers: 1,
   retries: 0,
   forbidOnly: true,

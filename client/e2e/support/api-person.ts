@@ -10,11 +10,16 @@ interface CallOptions {
 
 /** One person's way through the HTTP API: for what a test needs to find there before it opens a page. */
 export class ApiPerson {
+  static readonly #known = new Map<string, ApiPerson>()
   #cookie = ''
 
+  /** Signs in once; whoever asks again goes on with that session. */
   static async signedIn({ email, password }: SignIn): Promise<ApiPerson> {
+    const known = ApiPerson.#known.get(email)
+    if (known !== undefined) return known
     const person = new ApiPerson()
     await person.post('/session', { email, password })
+    ApiPerson.#known.set(email, person)
     return person
   }
 

@@ -32,7 +32,10 @@ async function fillList(scope: Locator, spec: ListSpec, rows: readonly Values[])
   for (const [index, values] of rows.entries()) {
     if ((await row(index).count()) === 0) {
       // Rows inside rows have buttons of their own; the one of this list stands last in it.
-      await list.getByRole('button', { name: `Add a ${spec.one}`, exact: true }).last().click()
+      await list
+        .getByRole('button', { name: `Add a ${spec.one}`, exact: true })
+        .last()
+        .click()
     }
     await fillItems(row(index), spec.items, values)
   }

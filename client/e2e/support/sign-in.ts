@@ -1,4 +1,4 @@
-import { expect, type Browser, type BrowserContextOptions, type Page } from '@playwright/test'
+import { expect, type Browser, type BrowserContext, type Page } from '@playwright/test'
 import type { SignIn } from './sign-ins'
 
 /** Through the sign-in page, as a person does it; lands on the desk. */
@@ -10,14 +10,19 @@ export async function signIn(page: Page, { email, password }: SignIn): Promise<v
   await expect(page.getByRole('heading', { name: 'Waiting for you' })).toBeVisible()
 }
 
-/** A browser of this person's own, signed in. */
-export async function signedIn(
-  browser: Browser,
-  person: SignIn,
-  options: BrowserContextOptions = {},
-): Promise<Page> {
-  const context = await browser.newContext(options)
+type Kept = Awaited<ReturnType<BrowserContext['storageState']>>
+const kept = new Map<string, Kept>()
+
+/** A browser of this person's own, signed in; a second one goes on with the session of the first. */
+export async function signedIn(browser: Browser, person: SignIn): Promise<Page> {
+  const storageState = kept.get(person.email)
+  const context = await browser.newContext({ storageState })
   const page = await context.newPage()
-  await signIn(page, person)
+  if (storageState === undefined) {
+    await signIn(page, person)
+    kept.set(person.email, await context.storageState())
+  } else {
+    await page.goto('/desk')
+  }
   return page
 }
