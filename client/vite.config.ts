@@ -31,5 +31,6 @@ export default defineConfig({
     include: ['src/**/*.test.{ts,tsx}'],
     setupFiles: ['src/test-setup.ts'],
     passWithNoTests: false,
+    maxWorkers: 2,
   },
 })

@@ -27,6 +27,8 @@ export default {
   testEnvironment: 'node',
   testMatch: ['<rootDir>/src/**/*.spec.ts', '<rootDir>/test/**/*.e2e-spec.ts'],
   testTimeout: 60_000,
+  // The database works beside them; on two cores the default would leave one idle.
+  maxWorkers: 2,
   moduleNameMapper: { '^(\\.{1,2}/.*)\\.js$': '$1' },
   testEnvironmentOptions: {
     customExportConditions: ['@wadestone/source', 'require', 'node', 'node-addons'],

@@ -1,5 +1,9 @@
 import { defineConfig } from 'vitest/config'
 
 export default defineConfig({
-  test: { include: ['src/**/*.test.ts'], passWithNoTests: false },
+  test: {
+    include: ['src/**/*.test.ts'],
+    passWithNoTests: false,
+    maxWorkers: 2,
+  },
 })

@@ -21,6 +21,19 @@ afterAll(() => app.stop())
 const tokensMailed = () =>
   app.mail.to(walked.producer.email ?? '').flatMap(({ text }) => /#t=([\w-]{43})/.exec(text ?? '')?.[1] ?? [])
 
+describe('a packet asked for twice while it is made', () => {
+  it('is the same packet, of one revision', async () => {
+    const other = await walk.draft('twice@farms.example')
+    const ask = () =>
+      district.planner.api.act(`/jobs/${other.job.id}/packets`, { designId: other.designId }).expect(202)
+    const [first, second] = [(await ask()).body as PacketView, (await ask()).body as PacketView]
+    expect(second).toMatchObject({ id: first.id, revision: 1 })
+    await app.drain()
+    expect((await ask()).body).toMatchObject({ revision: 2 })
+    await app.drain()
+  })
+})
+
 describe('what the post or a drawing lost', () => {
   it('a packet that failed is made again as the same packet, and one that did not fail is not', async () => {
     const packet = await walk.packet(walked)

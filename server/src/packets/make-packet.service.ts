@@ -2,6 +2,7 @@ import { Injectable } from '@nestjs/common'
 import { randomUUID } from 'node:crypto'
 import { Problem, type PacketView } from 'shared'
 import { FreezeDesignService } from '../designs/freeze-design.service.js'
+import { Revision } from '../designs/revision.entity.js'
 import { JobAccessService, type Asking } from '../jobs/job-access.service.js'
 import { JobsService } from '../jobs/jobs.service.js'
 import type { Tx } from '../platform/database/tx.js'
@@ -41,7 +42,9 @@ export class MakePacketService {
     asking: Asking,
     { jobId, designId }: { jobId: string; designId: string },
   ): Promise<Packet> {
-    await this.access.find(tx, asking, 'packet:make', jobId, 'to-change')
+    const { packetId } = await this.access.find(tx, asking, 'packet:make', jobId, 'to-change')
+    const underWay = packetId === null ? null : await this.underWay(tx, { packetId, designId })
+    if (underWay !== null) return underWay
     const revision = await this.designs.freeze(tx, jobId, designId)
     await this.voidEarlierSignatures(tx, jobId, revision.number)
     const packet = await this.open(tx, {
@@ -54,6 +57,18 @@ export class MakePacketService {
     const job = await this.access.load(tx, jobId, 'to-change')
     await this.jobs.change(tx, job, { packetId: packet.id })
     return packet
+  }
+
+  /** Asked for twice at once, as by two windows: whatever changes the design takes the packet off the job first. */
+  private async underWay(
+    tx: Tx,
+    { packetId, designId }: { packetId: string; designId: string },
+  ): Promise<Packet | null> {
+    const packet = await this.packets.load(tx, packetId)
+    if (packet.status !== 'waiting' && packet.status !== 'making') return null
+    const { districtId } = tx
+    const isSame = await tx.manager.existsBy(Revision, { districtId, id: packet.revisionId, designId })
+    return isSame ? packet : null
   }
 
   /** Packet B of an approved revision. */

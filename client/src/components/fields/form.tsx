@@ -24,8 +24,10 @@ export function Form<In extends FieldValues, Out>(props: FormProps<In, Out>) {
   const { form, onSubmit, problem = null, pointerUnder = '', label, children } = props
   const labels = useMemo(() => new Map<string, string>(), [])
   const summary = useRef<HTMLDivElement>(null)
-  const { errors, submitCount, isSubmitting } = form.formState
+  const { errors, submitCount, isSubmitting, isSubmitSuccessful } = form.formState
   const flat = flatErrors(errors)
+  // What is typed after a save went well is not yet an error to be led to.
+  const hasFailed = submitCount > 0 && (!isSubmitSuccessful || problem !== null)
   const { setError } = form
 
   useEffect(() => {
@@ -57,7 +59,7 @@ export function Form<In extends FieldValues, Out>(props: FormProps<In, Out>) {
             })()
           }}
         >
-          {submitCount > 0 && flat.length > 0 ? (
+          {hasFailed && flat.length > 0 ? (
             <ErrorSummary ref={summary} errors={flat} labels={labels} />
           ) : (
             <ProblemAlert error={problem} ref={summary} />
