@@ -32,5 +32,7 @@ export default defineConfig({
     setupFiles: ['src/test-setup.ts'],
     passWithNoTests: false,
     maxWorkers: 2,
+    // A form of many fields in a simulated browser takes seconds on a busy machine.
+    testTimeout: 30_000,
   },
 })

@@ -5,5 +5,6 @@ export default defineConfig({
     include: ['src/**/*.test.ts'],
     passWithNoTests: false,
     maxWorkers: 2,
+    testTimeout: 60_000,
   },
 })

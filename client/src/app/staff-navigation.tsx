@@ -1,8 +1,8 @@
 import Box from '@mui/material/Box'
 import type { Permission } from 'shared'
-import { useEffect, useRef } from 'react'
-import { NavLink, useLocation } from 'react-router-dom'
+import { NavLink } from 'react-router-dom'
 import { useMay } from '../api/session-context'
+import { useCurrentInView } from '../components/layout/use-current-in-view'
 
 interface Place {
   to: string
@@ -23,13 +23,7 @@ const places: readonly Place[] = [
 /** On a phone the places scroll sideways, and the one that one is at is brought into view. */
 export function StaffNavigation() {
   const may = useMay()
-  const { pathname } = useLocation()
-  const bar = useRef<HTMLElement>(null)
-
-  useEffect(() => {
-    const current = bar.current?.querySelector<HTMLElement>('[aria-current="page"]')
-    current?.scrollIntoView?.({ block: 'nearest', inline: 'center' })
-  }, [pathname])
+  const bar = useCurrentInView()
 
   return (
     <Box

@@ -3,7 +3,7 @@ import { Fragment } from 'react'
 import type { PartFailed, PartWaiting } from 'shared'
 import { TextLink } from '../../components/layout/text-link'
 import { fieldPlace, partPlace, type PlacedDesign } from './design-place'
-import { waitedForWords } from './part-words'
+import { waitedForWords } from './waited-for-words'
 
 interface NotReadyNoteProps {
   design: PlacedDesign

@@ -1,11 +1,10 @@
 import Box from '@mui/material/Box'
-import { designParts, type DesignView } from 'shared'
+import { partWords, designParts, type DesignView } from 'shared'
 import { VerdictMark } from '../../components/feedback/verdict-mark'
 import { Section } from '../../components/layout/section'
 import { TextLink } from '../../components/layout/text-link'
 import { partPlace } from './design-place'
 import { NotReadyNote } from './not-ready-note'
-import { partWords } from './part-words'
 
 interface OpenPartsProps {
   design: DesignView

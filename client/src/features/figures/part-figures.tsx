@@ -1,11 +1,10 @@
 import Typography from '@mui/material/Typography'
-import type { DesignPartName, DesignView } from 'shared'
+import { partWords, type DesignPartName, type DesignView } from 'shared'
 import { FigureRow, FigureRows } from '../../components/layout/figure-rows'
 import { Section } from '../../components/layout/section'
 import { TextLink } from '../../components/layout/text-link'
 import { partPlace } from './design-place'
 import { panelFigures } from './panel-figures'
-import { partWords } from './part-words'
 import { WorkingRow } from './working-row'
 
 interface PartFiguresProps {

@@ -1,8 +1,8 @@
 import Box from '@mui/material/Box'
-import { useEffect, useRef } from 'react'
-import { NavLink, useLocation } from 'react-router-dom'
+import { NavLink } from 'react-router-dom'
 import type { JobView, Permission } from 'shared'
 import { useMay } from '../../api/session-context'
+import { useCurrentInView } from '../../components/layout/use-current-in-view'
 
 interface JobTab {
   path: string
@@ -35,13 +35,7 @@ interface JobFrameTabsProps {
 /** The pages of one job as links. On a phone they scroll sideways, and the page one is on is brought into view. */
 export function JobFrameTabs({ job }: JobFrameTabsProps) {
   const may = useMay()
-  const { pathname } = useLocation()
-  const bar = useRef<HTMLElement>(null)
-
-  useEffect(() => {
-    const current = bar.current?.querySelector<HTMLElement>('[aria-current="page"]')
-    current?.scrollIntoView?.({ block: 'nearest', inline: 'center' })
-  }, [pathname])
+  const bar = useCurrentInView()
 
   return (
     <Box

@@ -1,14 +1,8 @@
 import Box from '@mui/material/Box'
-import Button from '@mui/material/Button'
-import Dialog from '@mui/material/Dialog'
-import DialogActions from '@mui/material/DialogActions'
-import DialogContent from '@mui/material/DialogContent'
 import Typography from '@mui/material/Typography'
-import { useId, useState } from 'react'
 import type { ScheduleView } from 'shared'
 import { usePutScheduleInForce } from '../../api/schedules'
-import { ActButton } from '../../components/feedback/act-button'
-import { ProblemAlert } from '../../components/feedback/problem-alert'
+import { InForceButton } from '../../components/feedback/in-force-button'
 import type { NamedLine } from './unmapped-lines'
 
 interface PutScheduleInForceProps {
@@ -24,42 +18,19 @@ const paysForNothing = ({ kind, lines }: ScheduleView, unmapped: number): boolea
 
 export function PutScheduleInForce({ schedule, unmapped, reasons }: PutScheduleInForceProps) {
   const put = usePutScheduleInForce(schedule.id)
-  const [isAsking, setIsAsking] = useState(false)
-  const titleId = useId()
   const blocks = paysForNothing(schedule, unmapped.length)
     ? [...reasons, 'Map at least one line: a rate for each unit that no line is mapped to pays nothing.']
     : reasons
-  const close = () => setIsAsking(false)
   return (
     <Box sx={{ mt: 6 }}>
-      <ActButton words="Put in force" reasons={blocks} isMain onAct={() => setIsAsking(true)} />
-      <Dialog open={isAsking} onClose={close} aria-labelledby={titleId}>
-        <DialogContent>
-          <Typography variant="h2" id={titleId}>
-            Put {schedule.name} in force?
-          </Typography>
-          <Typography sx={{ my: 3 }}>
-            After this it can never be edited, neither a rate nor what a line pays for. It takes the place of
-            the schedule “{schedule.key}” that is in force now, if there is one; jobs already signed keep
-            theirs.
-          </Typography>
-          {unmapped.length > 0 && <UnmappedList lines={unmapped} />}
-          <ProblemAlert error={put.error} />
-        </DialogContent>
-        <DialogActions>
-          <Button onClick={close}>Not yet</Button>
-          <Button
-            variant="contained"
-            color="primary"
-            aria-disabled={put.isPending}
-            onClick={() => {
-              if (!put.isPending) put.mutate(undefined, { onSuccess: close })
-            }}
-          >
-            {put.isPending ? 'Putting in force…' : 'Put in force for good'}
-          </Button>
-        </DialogActions>
-      </Dialog>
+      <InForceButton words="Put in force" name={schedule.name} reasons={blocks} put={put}>
+        <Typography sx={{ my: 3 }}>
+          After this it can never be edited, neither a rate nor what a line pays for. It takes the place of
+          the schedule “{schedule.key}” that is in force now, if there is one; jobs already signed keep
+          theirs.
+        </Typography>
+        {unmapped.length > 0 && <UnmappedList lines={unmapped} />}
+      </InForceButton>
     </Box>
   )
 }

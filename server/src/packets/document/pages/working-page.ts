@@ -1,4 +1,4 @@
-import { trimmedNumber, type WorkingFigure } from 'shared'
+import { partWords, trimmedNumber, type WorkingFigure } from 'shared'
 import type { Block, PageDraft, TableRow } from '../layout/block.js'
 import type { PacketSource } from '../packet-source.js'
 
@@ -26,21 +26,6 @@ export function workingPage({ result }: PacketSource): PageDraft {
     },
   ]
   return { title: 'Appendix: working', blocks }
-}
-
-const partWords: { readonly [part in WorkingFigure['part']]: string } = {
-  herd: 'Herd and water',
-  profile: 'Ramp',
-  earthwork: 'Earthwork',
-  rock: 'Rock',
-  fabric: 'Fabric',
-  approachPad: 'Approach pad',
-  closingPanel: 'Closing panel',
-  fence: 'Fence',
-  runoff: 'Runoff',
-  berm: 'Berm',
-  pond: 'Pond',
-  seeding: 'Seeding',
 }
 
 function figureRow({ label, formula, numbers, result, unit, source }: WorkingFigure): TableRow {
