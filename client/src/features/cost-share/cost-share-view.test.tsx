@@ -31,7 +31,7 @@ const fund: FundedSource = {
   kind: 'unit-rate',
   offered: money('460.00'),
   paid: money('400.00'),
-  cuts: [{ reason: 'source cap 400.00', amount: money('60.00') }],
+  cuts: [{ reason: 'source cap $400.00', amount: money('60.00') }],
   lines: [{ key: 'gate', quantityUsed: 2, rate: '230.00', amount: money('400.00') }],
   advance: money('0.00'),
 }
@@ -62,7 +62,7 @@ const show = (result: Partial<DesignView['result']>, missing: string[] = []) =>
 describe('cost and who pays', () => {
   it('names what each fund was cut by and what is left to the landowner', () => {
     show({ cost: { ok: true, value: cost }, funding: { ok: true, value: funding } })
-    expect(screen.getByText('−$60.00, source cap 400.00')).toBeInTheDocument()
+    expect(screen.getByText('−$60.00, source cap $400.00')).toBeInTheDocument()
     expect(screen.getByText('Landowner’s share').closest('div')).toHaveTextContent('$90.00')
     expect(screen.getByRole('row', { name: /^Total/ })).toHaveTextContent('$400.00$490.00$600.00')
   })

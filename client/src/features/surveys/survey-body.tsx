@@ -20,7 +20,11 @@ export function SurveyBody({ draft, isLocked, told }: SurveyBodyProps) {
   return (
     <>
       <Box sx={{ display: 'grid', gridTemplateColumns: columns, columnGap: 8 }}>
-        <Box component="fieldset" disabled={isLocked} sx={{ border: 0, m: 0, p: 0, minWidth: 0 }}>
+        <Box
+          component="fieldset"
+          disabled={isLocked}
+          sx={{ border: 0, m: 0, p: 0, minWidth: 0, '&:disabled button': { visibility: 'hidden' } }}
+        >
           <SurveyFields kind={draft.kind} soFar={soFar} />
         </Box>
         <SurveySide soFar={soFar} />

@@ -3,6 +3,7 @@ import { allocateMoney } from '../allocate-money.js'
 import { Exact, exactSum, type ExactNumber } from '../exact.js'
 import { halfUpToCents } from '../half-up-to-cents.js'
 import { requireDecimal } from '../require-decimal.js'
+import { moneyText } from '../../format/money-text.js'
 import { noMoney, subtractMoney } from '../money-arithmetic.js'
 import type { FundingCut, FundingSource } from './funding-source.js'
 import type { PaidSoFar, Share, StackRule } from './stack-state.js'
@@ -79,7 +80,7 @@ function applied(before: CutOffer, { shares, reasons }: Step): CutOffer {
 function downTo(shares: Share[], limit: string | undefined, field: string, name: string): Step {
   if (limit === undefined) return unchanged(shares)
   const most = halfUpToCents(requireDecimal({ field, value: limit }))
-  return { shares: scaledTo(shares, new Exact(most)), reasons: [whole(`${name} ${most}`)] }
+  return { shares: scaledTo(shares, new Exact(most)), reasons: [whole(`${name} ${moneyText(most)}`)] }
 }
 
 function outsideTheGroup(shares: Share[], group: string | undefined, { byGroup }: PaidSoFar): Step {

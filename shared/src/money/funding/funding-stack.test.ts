@@ -73,7 +73,7 @@ describe('fundingStack on one constructed job (no published source)', () => {
       paid: '2614.48',
       percentOf: 'estimated-cost',
       cuts: [
-        { reason: 'source cap 4500.00', amount: '66.98' },
+        { reason: 'source cap $4,500.00', amount: '66.98' },
         { reason: 'stack limit 100 % of estimated cost', amount: '1885.52' },
       ],
     })
@@ -107,7 +107,10 @@ describe('fundingStack on one constructed job (no published source)', () => {
 describe('fundingStack', () => {
   it('holds a source to what is left of the person limit, after its own cap', () => {
     const [source] = stack([{ ...b, personLimitRemaining: '1000.00' }]).sources
-    expect(source?.cuts.map(({ reason }) => reason)).toEqual(['source cap 4500.00', 'person limit 1000.00'])
+    expect(source?.cuts.map(({ reason }) => reason)).toEqual([
+      'source cap $4,500.00',
+      'person limit $1,000.00',
+    ])
     expect(source?.paid).toBe('1000.00')
   })
 
