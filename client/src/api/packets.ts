@@ -76,11 +76,24 @@ export function useConsent(packetId: string) {
   })
 }
 
+const unionOf = (one: readonly number[], other: readonly number[]): number[] => [
+  ...new Set([...one, ...other]),
+]
+
 export function useReadPage(packetId: string) {
-  const onSuccess = useStorePacket()
+  const queries = useQueryClient()
+  const refresh = useJobRefresh()
   return useMutation({
     mutationFn: (page: number) =>
       request<PacketView>(`/packets/${packetId}/read-pages`, { method: 'POST', body: { page } }),
-    onSuccess,
+    onSuccess: async (packet) => {
+      // An answer still under way may be older than this one, and a page once read stays read.
+      await queries.cancelQueries({ queryKey: packetKey(packet.id) })
+      queries.setQueryData<PacketView>(packetKey(packet.id), (earlier) => ({
+        ...packet,
+        pagesReadByMe: unionOf(earlier?.pagesReadByMe ?? [], packet.pagesReadByMe),
+      }))
+      await refresh(packet.jobId)
+    },
   })
 }
